@@ -1,0 +1,9 @@
+package org.crossreach.survey;
+
+/**
+ * A file that was read.
+ *
+ * @param file its path relative to the measurement's folder, with forward slashes
+ * @param sha256 SHA-256 of its bytes as stored, 64 lower-case hexadecimal digits
+ */
+public record InputFile(String file, String sha256) {}

@@ -1,0 +1,24 @@
+package org.crossreach.survey;
+
+/**
+ * One crossing of the river.
+ *
+ * @param name name of the pass: its file's name without folder and endings, for example {@code
+ *     pass-01}
+ * @param file file that holds its ensembles, relative to the measurement's folder
+ * @param startBank bank from which the boat started
+ * @param used whether the pass counts in the measurement's discharge
+ * @param note why it does not count, or any remark; may be empty
+ * @param leftEdge unmeasured water at the left bank
+ * @param rightEdge unmeasured water at the right bank
+ * @param ensembles what the instrument recorded
+ */
+public record Pass(
+    String name,
+    String file,
+    Bank startBank,
+    boolean used,
+    String note,
+    Edge leftEdge,
+    Edge rightEdge,
+    Ensembles ensembles) {}
