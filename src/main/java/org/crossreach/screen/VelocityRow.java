@@ -1,0 +1,33 @@
+package org.crossreach.screen;
+
+/**
+ * Room for the water velocities of one ensemble, to be filled again for each ensemble.
+ *
+ * <p>Components in m/s on true east and north, relative to the boat, indexed by cell. One row
+ * belongs to one thread.
+ */
+public final class VelocityRow {
+
+  final double[] east;
+  final double[] north;
+
+  /**
+   * Makes room.
+   *
+   * @param cells number of cells
+   */
+  public VelocityRow(int cells) {
+    east = new double[cells];
+    north = new double[cells];
+  }
+
+  /** Eastward velocity of the water relative to the boat (m/s). */
+  public double eastMps(int cell) {
+    return east[cell];
+  }
+
+  /** Northward velocity of the water relative to the boat (m/s). */
+  public double northMps(int cell) {
+    return north[cell];
+  }
+}

@@ -1,0 +1,77 @@
+package org.crossreach.section;
+
+/**
+ * Room for the usable cells of one ensemble, from the top down; to be filled again for each
+ * ensemble. One column belongs to one thread.
+ *
+ * <p>Heights are above the bed (m). Velocities are of the water over the ground (m/s): {@code
+ * normal} positive downstream, {@code along} positive from the left to the right bank.
+ */
+public final class Column {
+
+  int size;
+  double depthM;
+  final int[] cell;
+  final double[] upperM;
+  final double[] lowerM;
+  final double[] normalMps;
+  final double[] alongMps;
+
+  /**
+   * Makes room.
+   *
+   * @param cells largest number of cells
+   */
+  public Column(int cells) {
+    cell = new int[cells];
+    upperM = new double[cells];
+    lowerM = new double[cells];
+    normalMps = new double[cells];
+    alongMps = new double[cells];
+  }
+
+  /** Number of usable cells. */
+  public int size() {
+    return size;
+  }
+
+  /** Depth of the water (m). */
+  public double depthM() {
+    return depthM;
+  }
+
+  /** Number of the cell in its ensemble, from 0 at the top. */
+  public int cell(int j) {
+    return cell[j];
+  }
+
+  /** Height of the cell's upper edge above the bed (m). */
+  public double upperM(int j) {
+    return upperM[j];
+  }
+
+  /** Height of the cell's lower edge above the bed (m). */
+  public double lowerM(int j) {
+    return lowerM[j];
+  }
+
+  /** Height of the cell's centre above the bed (m). */
+  public double centreM(int j) {
+    return 0.5 * (upperM[j] + lowerM[j]);
+  }
+
+  /** Height of the cell (m). */
+  public double heightM(int j) {
+    return upperM[j] - lowerM[j];
+  }
+
+  /** Velocity component of a cell (m/s). */
+  public double velocityMps(Component component, int j) {
+    return component == Component.NORMAL ? normalMps[j] : alongMps[j];
+  }
+
+  /** Whether no cell is missing between cell {@code j} and the next one below. */
+  public boolean joined(int j) {
+    return cell[j] + 1 == cell[j + 1];
+  }
+}
