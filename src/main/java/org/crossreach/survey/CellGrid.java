@@ -79,6 +79,17 @@ public final class CellGrid {
      * @param values at least as many values as the grid has cells; they are copied
      */
     public void addRow(double[] values) {
+      addRow(values, 0);
+    }
+
+    /**
+     * Appends a row.
+     *
+     * @param values holds as many values as the grid has cells, from {@code offset} on; they are
+     *     copied
+     * @param offset index of the first cell's value
+     */
+    public void addRow(double[] values, int offset) {
       int block = rows / ROWS_PER_BLOCK;
       if (block == blocks.length) {
         blocks = Arrays.copyOf(blocks, 2 * block);
@@ -86,7 +97,7 @@ public final class CellGrid {
       if (blocks[block] == null) {
         blocks[block] = new double[ROWS_PER_BLOCK * cells];
       }
-      System.arraycopy(values, 0, blocks[block], rows % ROWS_PER_BLOCK * cells, cells);
+      System.arraycopy(values, offset, blocks[block], rows % ROWS_PER_BLOCK * cells, cells);
       rows++;
     }
 

@@ -1,5 +1,7 @@
 package org.crossreach.survey;
 
+import java.util.List;
+
 /**
  * One crossing of the river.
  *
@@ -12,6 +14,7 @@ package org.crossreach.survey;
  * @param leftEdge unmeasured water at the left bank
  * @param rightEdge unmeasured water at the right bank
  * @param ensembles what the instrument recorded
+ * @param notes what the importer had to say about the file, may be empty
  */
 public record Pass(
     String name,
@@ -21,4 +24,10 @@ public record Pass(
     String note,
     Edge leftEdge,
     Edge rightEdge,
-    Ensembles ensembles) {}
+    Ensembles ensembles,
+    List<Note> notes) {
+
+  public Pass {
+    notes = List.copyOf(notes);
+  }
+}
