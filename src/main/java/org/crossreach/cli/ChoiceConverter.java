@@ -23,6 +23,9 @@ final class ChoiceConverter<E extends Enum<E> & Choice> implements ITypeConverte
         .orElseThrow(
             () ->
                 new TypeConversionException(
-                    "found \"" + key + "\", expected " + String.join(" or ", Choice.keys(options))));
+                    "found \""
+                        + key
+                        + "\", expected "
+                        + String.join(" or ", Choice.keys(options))));
   }
 }

@@ -62,7 +62,8 @@ public final class Crossreach implements Runnable {
    */
   public static void main(String[] words) {
     StandardOutput standardOutput = new StandardOutput();
-    PrintWriter out = new PrintWriter(new OutputStreamWriter(standardOutput, StandardCharsets.UTF_8));
+    PrintWriter out =
+        new PrintWriter(new OutputStreamWriter(standardOutput, StandardCharsets.UTF_8));
     PrintWriter err =
         new PrintWriter(
             new OutputStreamWriter(

@@ -55,6 +55,7 @@ final class StandardOutput extends OutputStream {
 
   private boolean readerHasGone() {
     String message = failure.getMessage();
-    return message != null && (message.contains("Broken pipe") || message.contains("pipe is being"));
+    return message != null
+        && (message.contains("Broken pipe") || message.contains("pipe is being"));
   }
 }

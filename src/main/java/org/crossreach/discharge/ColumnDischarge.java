@@ -51,8 +51,7 @@ public record ColumnDischarge(Section section, Transports transports, Method met
   private double combined(double normal, double along, int ensemble) {
     return switch (method) {
       case SECTION_NORMAL -> normal * section.progressM(ensemble);
-      case PATH_FLUX ->
-          normal * section.progressM(ensemble) - along * section.sidewaysM(ensemble);
+      case PATH_FLUX -> normal * section.progressM(ensemble) - along * section.sidewaysM(ensemble);
     };
   }
 }

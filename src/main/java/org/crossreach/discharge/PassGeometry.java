@@ -32,8 +32,7 @@ public record PassGeometry(
     return areaM2 / widthM;
   }
 
-  static PassGeometry of(
-      ColumnDischarge columns, double edgeDistanceM, double edgeAreaM2) {
+  static PassGeometry of(ColumnDischarge columns, double edgeDistanceM, double edgeAreaM2) {
     Section section = columns.section();
     Transports transports = columns.transports();
     int last = section.size() - 1;
@@ -54,7 +53,8 @@ public record PassGeometry(
         width,
         area,
         Line.azimuthDeg(
-            along * line.east() - normal * line.north(), along * line.north() + normal * line.east()),
+            along * line.east() - normal * line.north(),
+            along * line.north() + normal * line.east()),
         section.track().lengthM(last) / duration,
         duration,
         section.pass().usableCellsPct(),

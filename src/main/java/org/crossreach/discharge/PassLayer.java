@@ -50,8 +50,7 @@ final class PassLayer {
       } else if (each.pass().used()) {
         problems.add(obstacle.get());
       } else {
-        notes.add(
-            new Note(Note.Level.CAUTION, "pass-not-reduced", obstacle.get().toString()));
+        notes.add(new Note(Note.Level.CAUTION, "pass-not-reduced", obstacle.get().toString()));
       }
     }
     if (problems.isEmpty() && sound.stream().noneMatch(each -> each.pass().used())) {

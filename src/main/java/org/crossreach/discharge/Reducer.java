@@ -7,8 +7,8 @@ import org.crossreach.profile.Zone;
 import org.crossreach.section.Section;
 import org.crossreach.settings.Method;
 import org.crossreach.settings.Settings;
-import org.crossreach.survey.Edge;
 import org.crossreach.survey.Bank;
+import org.crossreach.survey.Edge;
 import org.crossreach.survey.Measurement;
 import org.crossreach.survey.Note;
 import org.crossreach.survey.Pass;
@@ -69,14 +69,11 @@ public record Reducer(int threads) {
     Pass pass = laid.pass();
     Section section = laid.section();
     double exponent = settings.exponent().value();
-    Transports transports =
-        Transports.of(section, settings.top(), settings.bottom(), exponent);
+    Transports transports = Transports.of(section, settings.top(), settings.bottom(), exponent);
     int wanted = settings.edgeEnsembles();
     boolean leftFirst = pass.startBank() == Bank.LEFT;
-    EdgeEstimate left =
-        EdgeEstimate.of(pass.leftEdge(), leftFirst, section, transports, wanted);
-    EdgeEstimate right =
-        EdgeEstimate.of(pass.rightEdge(), !leftFirst, section, transports, wanted);
+    EdgeEstimate left = EdgeEstimate.of(pass.leftEdge(), leftFirst, section, transports, wanted);
+    EdgeEstimate right = EdgeEstimate.of(pass.rightEdge(), !leftFirst, section, transports, wanted);
     ColumnDischarge columns = new ColumnDischarge(section, transports, settings.method());
     ColumnDischarge others = new ColumnDischarge(section, transports, other(settings.method()));
     return new PassDischarge(

@@ -7,8 +7,9 @@ import org.crossreach.survey.Gaps;
  * Velocity and position of the boat over the bed at every ensemble, on true east and north.
  *
  * <p>The displacement of ensemble i is its boat velocity times the time since ensemble i - 1; that
- * of the first ensemble is 0. A missing velocity is linear in time between its neighbours. Positions
- * stand at the end of the ensemble's averaging interval, from the place of the first ensemble.
+ * of the first ensemble is 0. A missing velocity is linear in time between its neighbours.
+ * Positions stand at the end of the ensemble's averaging interval, from the place of the first
+ * ensemble.
  */
 public final class Track {
 

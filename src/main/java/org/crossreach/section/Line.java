@@ -35,7 +35,8 @@ public record Line(double east, double north) {
   public static Line ofVector(double east, double north) {
     double length = Math.hypot(east, north);
     if (!(length > 0)) {
-      throw new IllegalArgumentException("the vector (" + east + ", " + north + ") has no direction");
+      throw new IllegalArgumentException(
+          "the vector (" + east + ", " + north + ") has no direction");
     }
     return new Line(east / length, north / length);
   }

@@ -4,7 +4,9 @@ import java.util.Arrays;
 import java.util.List;
 import java.util.Optional;
 
-/** A choice among named options; the key is its name in files, on the command line and in results. */
+/**
+ * A choice among named options; the key is its name in files, on the command line and in results.
+ */
 public interface Choice {
 
   /** Name of the option, lower case with hyphens, for example {@code section-normal}. */

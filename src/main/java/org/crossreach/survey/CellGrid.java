@@ -51,8 +51,7 @@ public final class CellGrid {
    * @param target receives {@link #cells()} values from index 0
    */
   public void copyRow(int row, double[] target) {
-    System.arraycopy(
-        blocks[row / ROWS_PER_BLOCK], row % ROWS_PER_BLOCK * cells, target, 0, cells);
+    System.arraycopy(blocks[row / ROWS_PER_BLOCK], row % ROWS_PER_BLOCK * cells, target, 0, cells);
   }
 
   /** Collects a grid row by row. */

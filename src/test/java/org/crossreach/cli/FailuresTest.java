@@ -21,8 +21,7 @@ import org.junit.jupiter.api.Test;
 class FailuresTest {
 
   private static final Problem COMMA =
-      new Problem(
-          "pass-01.csv", 118, "cell_size_m", "\"0,25\"", "a number", "use a decimal point");
+      new Problem("pass-01.csv", 118, "cell_size_m", "\"0,25\"", "a number", "use a decimal point");
 
   @Test
   void unusableInputIsEveryProblemAndTheirCount() {
@@ -67,9 +66,7 @@ class FailuresTest {
               throw new IOException("No space left on device");
             });
     assertTold(
-        ExitCode.CANNOT_WRITE,
-        "crossreach: cannot write out: No space left on device\n",
-        unnamed);
+        ExitCode.CANNOT_WRITE, "crossreach: cannot write out: No space left on device\n", unnamed);
   }
 
   @Test
