@@ -111,7 +111,8 @@ public record Reducer(int threads) {
   }
 
   private static List<Note> notes(LaidPass laid, Transports transports, int edgeEnsembles) {
-    List<Note> notes = new ArrayList<>(laid.section().pass().notes());
+    List<Note> notes = new ArrayList<>(laid.pass().notes());
+    notes.addAll(laid.section().pass().notes());
     if (transports.ownCount() < edgeEnsembles) {
       notes.add(
           new Note(
