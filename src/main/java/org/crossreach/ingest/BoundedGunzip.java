@@ -10,10 +10,10 @@ import java.util.zip.ZipException;
 /**
  * The unpacked bytes of a gzip file, with a bound on how much it may expand.
  *
- * <p>Tables of numbers shrink to a fifth or a tenth, tables of mostly empty fields to a fiftieth.
- * A file that unpacks to more than {@value #FREE_BYTES} bytes and to more than {@value #MOST_FOLD}
- * times its size is refused as soon as it has done so: deflate can blow up a thousandfold. Damage is
- * told as {@link UnreadableText}.
+ * <p>Tables of numbers shrink to a fifth or a tenth, tables of mostly empty fields to a fiftieth. A
+ * file that unpacks to more than {@value #FREE_BYTES} bytes and to more than {@value #MOST_FOLD}
+ * times its size is refused as soon as it has done so: deflate can blow up a thousandfold. Damage
+ * is told as {@link UnreadableText}.
  */
 final class BoundedGunzip extends InputStream {
 
@@ -39,7 +39,9 @@ final class BoundedGunzip extends InputStream {
       throw new UnreadableText("a file that ends within the gzip header", EXPECTED, REMEDY);
     } catch (ZipException e) {
       throw new UnreadableText(
-          "something that is not gzip", EXPECTED, "take the ending .gz off a file that is not packed");
+          "something that is not gzip",
+          EXPECTED,
+          "take the ending .gz off a file that is not packed");
     }
   }
 

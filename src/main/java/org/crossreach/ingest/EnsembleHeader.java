@@ -259,8 +259,9 @@ final class EnsembleHeader {
     Map<CellQuantity, String> stems = new EnumMap<>(CellQuantity.class);
     for (EnsembleColumn column : columns) {
       if (column != null && column.role() == EnsembleColumn.Role.CELL) {
-        present.computeIfAbsent(column.cellQuantity(), key -> new boolean[maxCells])[
-            column.cell() - 1] =
+        present
+                .computeIfAbsent(column.cellQuantity(), key -> new boolean[maxCells])[
+                column.cell() - 1] =
             true;
         String name = column.name();
         stems.putIfAbsent(column.cellQuantity(), name.substring(0, name.lastIndexOf('_') + 1));

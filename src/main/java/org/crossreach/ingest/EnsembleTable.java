@@ -38,6 +38,7 @@ final class EnsembleTable extends AbstractBaseCsvCallbackHandler<Object> {
   private boolean endsQuoted;
   private boolean blank;
   private boolean anyRow;
+  private long problemsBefore;
 
   /** For each field: index in {@link #row}, or one of the negative values below. */
   private int[] slots;
@@ -100,6 +101,7 @@ final class EnsembleTable extends AbstractBaseCsvCallbackHandler<Object> {
     cells = Double.NaN;
     timeRead = false;
     blank = false;
+    problemsBefore = problems.count();
   }
 
   @Override
@@ -207,8 +209,7 @@ final class EnsembleTable extends AbstractBaseCsvCallbackHandler<Object> {
         problems.add(line(), header.name(field), Quoted.of(buffer, start, end), "a number", "");
       }
     } else if (value != Math.rint(value)) {
-      problems.add(
-          line(), header.name(field), Quoted.of(buffer, start, end), "a whole number", "");
+      problems.add(line(), header.name(field), Quoted.of(buffer, start, end), "a whole number", "");
       value = Double.NaN;
     }
     if (key == NUMBER) {
@@ -253,6 +254,7 @@ final class EnsembleTable extends AbstractBaseCsvCallbackHandler<Object> {
       if (getFieldCount() == width) {
         takeRow();
       } else {
+        problems.takeBack(problemsBefore); // the fields were taken for those of other columns
         reportWidth(getFieldCount());
       }
     }
@@ -302,7 +304,11 @@ final class EnsembleTable extends AbstractBaseCsvCallbackHandler<Object> {
       remedy = "complete the row, or delete it";
     }
     problems.add(
-        line(), "", found + (found == 1 ? " field" : " fields"), width + " as in the header", remedy);
+        line(),
+        "",
+        found + (found == 1 ? " field" : " fields"),
+        width + " as in the header",
+        remedy);
   }
 
   private void takeRow() {

@@ -57,6 +57,19 @@ public final class FileProblems {
     }
   }
 
+  /** Number of problems so far, to come back to by {@link #takeBack}. */
+  long count() {
+    return count;
+  }
+
+  /** Forgets every problem after the first ones. */
+  void takeBack(long earlierCount) {
+    count = earlierCount;
+    while (listed.size() > count) {
+      listed.remove(listed.size() - 1);
+    }
+  }
+
   /** The problems, the uncounted rest as one last entry. */
   public List<Problem> list() {
     List<Problem> all = new ArrayList<>(listed);

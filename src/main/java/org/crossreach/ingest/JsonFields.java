@@ -11,10 +11,11 @@ import org.crossreach.settings.Choice;
 /**
  * The members of a JSON object, asked for one by one by name and type.
  *
- * <p>What is missing, of the wrong type or out of range becomes a problem with path and line, and
- * a stand-in value is returned, so that reading goes on and all problems of a file come together.
- * Asking for a key makes it a valid one; {@link #finish()} then reports every key that was not asked
- * for. An optional member that is {@code null} counts as absent. Not to be shared between threads.
+ * <p>What is missing, of the wrong type or out of range becomes a problem with path and line, and a
+ * stand-in value is returned, so that reading goes on and all problems of a file come together.
+ * Asking for a key makes it a valid one; {@link #finish()} then reports every key that was not
+ * asked for. An optional member that is {@code null} counts as absent. Not to be shared between
+ * threads.
  */
 public final class JsonFields {
 

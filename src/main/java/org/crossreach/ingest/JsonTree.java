@@ -104,7 +104,9 @@ public final class JsonTree {
     int end = message.indexOf('\n');
     String first = end < 0 ? message : message.substring(0, end);
     String place =
-        failure.getLocation() == null ? "" : " (column " + failure.getLocation().getColumnNr() + ")";
+        failure.getLocation() == null
+            ? ""
+            : " (column " + failure.getLocation().getColumnNr() + ")";
     return "an error of syntax" + place + ": " + Quoted.cut(first, 160);
   }
 
@@ -159,8 +161,7 @@ public final class JsonTree {
   private JsonNode text(String path, int line) throws IOException {
     String text = parser.getText();
     if (!StandardCharsets.UTF_8.newEncoder().canEncode(text)) {
-      problems.add(
-          line, path, "half of a surrogate pair", "whole characters", "correct the text");
+      problems.add(line, path, "half of a surrogate pair", "whole characters", "correct the text");
     }
     return new JsonNode.Text(path, line, text);
   }

@@ -275,9 +275,7 @@ record MeasurementFile(
           new TestEntry(
               test,
               file,
-              kind.equals("stationary")
-                  ? MovingBedTest.Kind.STATIONARY
-                  : MovingBedTest.Kind.LOOP));
+              kind.equals("stationary") ? MovingBedTest.Kind.STATIONARY : MovingBedTest.Kind.LOOP));
     }
     return tests;
   }

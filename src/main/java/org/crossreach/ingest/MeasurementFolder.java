@@ -89,10 +89,7 @@ public final class MeasurementFolder {
       byte[] bytes = StoredFile.bytes(path, settingsProblems);
       inputs.add(new InputFile(SettingsFile.NAME, StoredFile.sha256(bytes)));
       SettingsFile.of(
-          JsonTree.parse(bytes, settingsProblems),
-          settingsProblems,
-          Settings.defaults(),
-          passes);
+          JsonTree.parse(bytes, settingsProblems), settingsProblems, Settings.defaults(), passes);
     } catch (UnusableInput e) {
       // The problems are in settingsProblems already and are thrown with all others.
       assert !settingsProblems.isEmpty();
@@ -103,10 +100,12 @@ public final class MeasurementFolder {
   private Map<String, Path> findFiles(MeasurementFile file) throws IOException {
     Map<String, Path> files = new LinkedHashMap<>();
     for (MeasurementFile.PassEntry pass : file.passes()) {
-      FolderPath.find(folder, pass.fields(), "file").ifPresent(path -> files.put(pass.file(), path));
+      FolderPath.find(folder, pass.fields(), "file")
+          .ifPresent(path -> files.put(pass.file(), path));
     }
     for (MeasurementFile.TestEntry test : file.tests()) {
-      FolderPath.find(folder, test.fields(), "file").ifPresent(path -> files.put(test.file(), path));
+      FolderPath.find(folder, test.fields(), "file")
+          .ifPresent(path -> files.put(test.file(), path));
     }
     return files;
   }

@@ -11,8 +11,7 @@ import java.time.ZoneOffset;
  * <p>Kept for reuse: {@link #parse} replaces the time that was read before. {@code T} and {@code Z}
  * may be in lower case and {@code T} may be a space, as section 5.6 allows. Up to nine decimals of
  * a second are read, exactly. Not read: leap seconds ({@code :60}), of which this calendar has
- * none, and offsets beyond 18 hours. Source: Klyne and Newman 2002, RFC 3339,
- * doi:10.17487/RFC3339.
+ * none, and offsets beyond 18 hours. Source: Klyne and Newman 2002, RFC 3339, doi:10.17487/RFC3339.
  */
 final class Rfc3339 {
 
@@ -42,8 +41,7 @@ final class Rfc3339 {
 
   /** The time that was read last, with its offset. */
   OffsetDateTime toOffsetDateTime() {
-    return Instant.ofEpochSecond(epochSecond, nano)
-        .atOffset(ZoneOffset.ofTotalSeconds(offsetS));
+    return Instant.ofEpochSecond(epochSecond, nano).atOffset(ZoneOffset.ofTotalSeconds(offsetS));
   }
 
   /**
@@ -87,7 +85,8 @@ final class Rfc3339 {
     if (at < 0 || !parseOffset(text, at, to)) {
       return false;
     }
-    epochSecond = 86_400 * epochDay(year, month, day) + 3600 * hour + 60 * minute + second - offsetS;
+    epochSecond =
+        86_400 * epochDay(year, month, day) + 3600 * hour + 60 * minute + second - offsetS;
     return true;
   }
 

@@ -169,8 +169,7 @@ public final class SettingsFile {
         limit(fields, "bottom_vertical_velocity_mps", DEPARTURE, base.bottomVerticalVelocity()),
         limit(fields, "boat_speed_mps", DEPARTURE, base.boatSpeed()),
         limit(fields, "depth_beams", DEPTH_SHARE, base.depthBeams()),
-        (int)
-            fields.whole("minimum_cells", 1, EnsembleColumn.MOST_CELLS, base.minimumCells()),
+        (int) fields.whole("minimum_cells", 1, EnsembleColumn.MOST_CELLS, base.minimumCells()),
         fields.number("leave_out_top_m", LEFT_OUT, base.leaveOutTopM()),
         fields.has("exclusions") ? exclusions(fields, passes) : base.exclusions());
   }
@@ -201,8 +200,7 @@ public final class SettingsFile {
       long to = exclusion.whole("to_ensemble", 0, (long) PhysicalRange.NUMBER.highest());
       String reason = exclusion.text("reason");
       if (passes != null && exclusion.has("pass") && !passes.contains(pass)) {
-        exclusion.refuse(
-            "pass", Quoted.of(pass), JsonFields.oneOfPhrase(List.copyOf(passes)), "");
+        exclusion.refuse("pass", Quoted.of(pass), JsonFields.oneOfPhrase(List.copyOf(passes)), "");
       }
       if (exclusion.has("to_ensemble") && to < from) {
         exclusion.refuse(

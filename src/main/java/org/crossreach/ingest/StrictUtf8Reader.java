@@ -7,9 +7,9 @@ import java.io.Reader;
 /**
  * Characters of a UTF-8 text that holds neither malformed bytes nor NUL.
  *
- * <p>A byte-order mark at the start is skipped. At a byte that does not belong into such a text, all
- * characters before it are handed out first and the next call fails with {@link UnreadableText}, so
- * that the caller knows the line.
+ * <p>A byte-order mark at the start is skipped. At a byte that does not belong into such a text,
+ * all characters before it are handed out first and the next call fails with {@link
+ * UnreadableText}, so that the caller knows the line.
  */
 final class StrictUtf8Reader extends Reader {
 
