@@ -7,6 +7,7 @@ import java.io.PrintWriter;
 import java.nio.charset.StandardCharsets;
 import java.util.List;
 import java.util.Locale;
+import org.crossreach.report.FileKind;
 import org.crossreach.report.ProgramVersion;
 import org.crossreach.report.Units;
 import picocli.CommandLine;
@@ -29,7 +30,7 @@ import picocli.CommandLine.Spec;
 public final class Crossreach implements Runnable {
 
   /** Every command: a class named as the command is typed, with a capital first letter. */
-  static final List<Class<?>> COMMANDS = List.of(Check.class);
+  static final List<Class<?>> COMMANDS = List.of(Reduce.class, Check.class);
 
   @Option(
       names = "--version",
@@ -123,7 +124,8 @@ public final class Crossreach implements Runnable {
     program.getSubcommands().values().forEach(Crossreach::layOutHelp);
     return program
         .setExpandAtFiles(false)
-        .registerConverter(Units.class, new ChoiceConverter<>(Units.class));
+        .registerConverter(Units.class, new ChoiceConverter<>(Units.class))
+        .registerConverter(FileKind.class, new ChoiceConverter<>(FileKind.class));
   }
 
   private static void layOutHelp(CommandLine command) {

@@ -38,4 +38,10 @@ public record Measurement(
     movingBedTests = List.copyOf(movingBedTests);
     inputs = List.copyOf(inputs);
   }
+
+  /** The same measurement with other passes. */
+  public Measurement withPasses(List<Pass> others) {
+    return new Measurement(
+        id, site, party, remarks, stage, rating, water, instrument, others, movingBedTests, inputs);
+  }
 }

@@ -30,4 +30,9 @@ public record Pass(
   public Pass {
     notes = List.copyOf(notes);
   }
+
+  /** The same pass, used or not. */
+  public Pass withUse(boolean use, String why) {
+    return new Pass(name, file, startBank, use, why, leftEdge, rightEdge, ensembles, notes);
+  }
 }
