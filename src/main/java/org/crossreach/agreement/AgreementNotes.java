@@ -55,21 +55,30 @@ final class AgreementNotes {
               + Math.round(SHORTEST_EXPOSURE_S)
               + " s are usual in steady flow");
     }
+    addDepartures(summary, passes, notes);
+    return notes;
+  }
+
+  private static void addDepartures(Summary summary, List<PassDischarge> passes, List<Note> notes) {
+    List<String> departing = new ArrayList<>();
     for (PassDischarge each : passes) {
       double departure = summary.dischargeM3s().deviationPct(each.totalM3s());
       if (Math.abs(departure) > LARGEST_DEPARTURE_PCT) {
-        add(
-            notes,
-            "departing-pass",
-            String.format(
-                Locale.ROOT,
-                "%s departs by %+.1f %% from the mean, more than %.0f %%",
-                each.pass().name(),
-                departure,
-                LARGEST_DEPARTURE_PCT));
+        departing.add(String.format(Locale.ROOT, "%s (%+.1f %%)", each.pass().name(), departure));
       }
     }
-    return notes;
+    if (!departing.isEmpty()) {
+      add(
+          notes,
+          "departing-passes",
+          String.format(
+              Locale.ROOT,
+              "%d of %d passes depart by more than %.0f %% from the mean: %s",
+              departing.size(),
+              passes.size(),
+              LARGEST_DEPARTURE_PCT,
+              String.join(", ", departing)));
+    }
   }
 
   private static void add(List<Note> notes, String code, String text) {

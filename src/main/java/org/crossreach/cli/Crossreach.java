@@ -30,7 +30,7 @@ import picocli.CommandLine.Spec;
 public final class Crossreach implements Runnable {
 
   /** Every command: a class named as the command is typed, with a capital first letter. */
-  static final List<Class<?>> COMMANDS = List.of(Reduce.class, Check.class);
+  static final List<Class<?>> COMMANDS = List.of(Reduce.class, Check.class, Simulate.class);
 
   @Option(
       names = "--version",

@@ -121,6 +121,32 @@ record EnsembleColumn(
     return "bt_" + axes(frame).get(component - 1) + "_mps";
   }
 
+  /** Name of the column of a quantity in the records of a frame. */
+  static String nameOf(EnsembleQuantity quantity, Frame frame) {
+    int component = quantity.ordinal() - EnsembleQuantity.BOTTOM_1.ordinal();
+    if (component < 4) {
+      return bottomName(frame, component + 1);
+    }
+    return FIXED.values().stream()
+        .filter(column -> column.ensembleQuantity == quantity)
+        .map(EnsembleColumn::name)
+        .findFirst()
+        .orElseThrow();
+  }
+
+  /** Name of the columns of a quantity in the records of a frame, without the cell's number. */
+  static String nameOf(CellQuantity quantity, Frame frame) {
+    int component = quantity.ordinal() - CellQuantity.WATER_1.ordinal();
+    if (component < 4) {
+      return axes(frame).get(component) + "_mps";
+    }
+    return PER_CELL.entrySet().stream()
+        .filter(entry -> entry.getValue().cellQuantity == quantity)
+        .map(Map.Entry::getKey)
+        .findFirst()
+        .orElseThrow();
+  }
+
   private static void fixed(String name, Role role) {
     FIXED.put(name, new EnsembleColumn(name, role, null, null, 0, ANY));
   }

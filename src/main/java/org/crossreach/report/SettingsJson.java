@@ -2,6 +2,7 @@ package org.crossreach.report;
 
 import java.io.IOException;
 import java.io.OutputStream;
+import org.crossreach.notation.JsonText;
 import org.crossreach.settings.Exclusion;
 import org.crossreach.settings.Limit;
 import org.crossreach.settings.Screening;

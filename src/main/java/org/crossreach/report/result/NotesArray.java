@@ -3,7 +3,7 @@ package org.crossreach.report.result;
 import java.io.IOException;
 import java.util.List;
 import java.util.Locale;
-import org.crossreach.report.JsonText;
+import org.crossreach.notation.JsonText;
 import org.crossreach.survey.Note;
 
 /** Notes as an array of objects. */

@@ -5,7 +5,7 @@ import java.util.Locale;
 import org.crossreach.agreement.Result;
 import org.crossreach.agreement.Summary;
 import org.crossreach.discharge.PassDischarge;
-import org.crossreach.report.JsonText;
+import org.crossreach.notation.JsonText;
 import org.crossreach.settings.BoatVelocity;
 import org.crossreach.survey.Pass;
 

@@ -2,7 +2,7 @@ package org.crossreach.report.result;
 
 import java.io.IOException;
 import org.crossreach.agreement.Result;
-import org.crossreach.report.JsonText;
+import org.crossreach.notation.JsonText;
 import org.crossreach.report.ProgramVersion;
 import org.crossreach.survey.InputFile;
 

@@ -4,7 +4,7 @@ import java.io.IOException;
 import java.io.OutputStream;
 import java.util.List;
 import org.crossreach.agreement.Result;
-import org.crossreach.report.JsonText;
+import org.crossreach.notation.JsonText;
 
 /** Writes the result of a measurement as JSON. */
 public final class ResultJson {

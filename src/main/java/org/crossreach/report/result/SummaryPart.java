@@ -5,7 +5,7 @@ import org.crossreach.agreement.Directions;
 import org.crossreach.agreement.Result;
 import org.crossreach.agreement.Spread;
 import org.crossreach.agreement.Summary;
-import org.crossreach.report.JsonText;
+import org.crossreach.notation.JsonText;
 
 /** The used passes taken together. */
 final class SummaryPart implements ResultPart {

@@ -2,7 +2,7 @@ package org.crossreach.report.result;
 
 import java.io.IOException;
 import org.crossreach.discharge.ZoneDischarge;
-import org.crossreach.report.JsonText;
+import org.crossreach.notation.JsonText;
 
 /** Discharges by zone as members (m³/s). */
 final class ZonesObject {

@@ -1,4 +1,4 @@
-package org.crossreach.report;
+package org.crossreach.notation;
 
 import com.fasterxml.jackson.core.JsonFactory;
 import com.fasterxml.jackson.core.JsonGenerator;
