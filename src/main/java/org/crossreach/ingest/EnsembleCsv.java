@@ -4,12 +4,10 @@ import de.siegmar.fastcsv.reader.CsvParseException;
 import de.siegmar.fastcsv.reader.CsvReader;
 import java.io.IOException;
 import java.io.InputStream;
-import java.io.OutputStream;
 import java.io.UncheckedIOException;
 import java.nio.file.FileSystemException;
 import java.nio.file.Files;
 import java.nio.file.Path;
-import java.security.DigestInputStream;
 import org.crossreach.survey.InputFile;
 import org.crossreach.survey.UnusableInput;
 
@@ -47,15 +45,11 @@ public final class EnsembleCsv {
   public static EnsembleFile read(Path file, String shownName) throws UnusableInput, IOException {
     FileProblems problems = new FileProblems(shownName);
     StoredFile.check(file, problems);
-    try (InputStream stored = Files.newInputStream(file)) {
-      DigestInputStream digested = new DigestInputStream(stored, StoredFile.sha256());
-      EnsembleTable table = read(digested, file.toString().endsWith(".gz"), problems);
+    try (DigestedStream stored = new DigestedStream(Files.newInputStream(file))) {
+      EnsembleTable table = read(stored, file.toString().endsWith(".gz"), problems);
       problems.throwIfAny();
-      digested.transferTo(OutputStream.nullOutputStream());
       return new EnsembleFile(
-          table.build(),
-          new InputFile(shownName, StoredFile.hex(digested.getMessageDigest().digest())),
-          table.header().notes());
+          table.build(), new InputFile(shownName, stored.sha256()), table.header().notes());
     } catch (FileSystemException e) {
       throw StoredFile.named(shownName, e);
     }
