@@ -123,6 +123,7 @@ final class EnsembleTable extends AbstractBaseCsvCallbackHandler<Object> {
 
   private void handleBeyond(int field, char[] buffer, int offset, int length) {
     if (field >= MOST_COLUMNS) {
+      problems.takeBack(problemsBefore);
       problems.add(
           line(),
           "",
@@ -204,6 +205,9 @@ final class EnsembleTable extends AbstractBaseCsvCallbackHandler<Object> {
       if (buffer[i] == ',') {
         return "use a decimal point";
       }
+      if (buffer[i] == 0) {
+        return "the file is damaged: copy it again";
+      }
     }
     return MISSING_REMEDY;
   }
@@ -228,16 +232,18 @@ final class EnsembleTable extends AbstractBaseCsvCallbackHandler<Object> {
     if (blank) {
       return null;
     }
-    if (endsQuoted && text.ended() && text.last() != '"') {
+    boolean openQuote = endsQuoted && text.ended() && text.last() != '"';
+    if (openQuote) {
+      problems.takeBack(problemsBefore); // the mark swallowed what follows it
       problems.add(line(), "", "a quotation mark without its partner", "a closing one", "");
     }
     if (header == null) {
       takeHeader();
     } else {
       anyRow = true;
-      if (getFieldCount() == row.length) {
+      if (!openQuote && getFieldCount() == row.length) {
         takeRow();
-      } else {
+      } else if (!openQuote) {
         problems.takeBack(problemsBefore); // the fields were taken for those of other columns
         reportWidth(getFieldCount());
       }
