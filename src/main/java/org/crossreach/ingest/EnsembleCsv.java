@@ -5,7 +5,6 @@ import de.siegmar.fastcsv.reader.CsvReader;
 import java.io.IOException;
 import java.io.InputStream;
 import java.io.UncheckedIOException;
-import java.nio.file.FileSystemException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import org.crossreach.survey.InputFile;
@@ -45,17 +44,31 @@ public final class EnsembleCsv {
   public static EnsembleFile read(Path file, String shownName) throws UnusableInput, IOException {
     FileProblems problems = new FileProblems(shownName);
     StoredFile.check(file, problems);
-    try (DigestedStream stored = new DigestedStream(Files.newInputStream(file))) {
-      EnsembleTable table = read(stored, file.toString().endsWith(".gz"), problems);
-      problems.throwIfAny();
-      return new EnsembleFile(
-          table.build(), new InputFile(shownName, stored.sha256()), table.header().notes());
-    } catch (FileSystemException e) {
+    try (InputStream stored = Files.newInputStream(file)) {
+      return read(stored, file.toString().endsWith(".gz"), problems);
+    } catch (IOException e) {
       throw StoredFile.named(shownName, e);
     }
   }
 
-  private static EnsembleTable read(InputStream stored, boolean packed, FileProblems problems)
+  /**
+   * Reads the bytes of a file.
+   *
+   * @param bytes the bytes as stored
+   * @param packed whether they are packed by gzip
+   * @param problems receives what is wrong; names the file
+   */
+  static EnsembleFile read(InputStream bytes, boolean packed, FileProblems problems)
+      throws UnusableInput, IOException {
+    try (DigestedStream stored = new DigestedStream(bytes)) {
+      EnsembleTable table = readTable(stored, packed, problems);
+      problems.throwIfAny();
+      return new EnsembleFile(
+          table.build(), new InputFile(problems.file(), stored.sha256()), table.header().notes());
+    }
+  }
+
+  private static EnsembleTable readTable(InputStream stored, boolean packed, FileProblems problems)
       throws UnusableInput, IOException {
     StrictUtf8Reader text;
     try {
