@@ -87,4 +87,80 @@ public record Screening(
         /* leaveOutTopM= */ 0.0,
         List.of());
   }
+
+  /** The same choices, three beams accepted or not. */
+  public Screening withThreeBeam(boolean threeBeam) {
+    return new Screening(
+        errorVelocity,
+        verticalVelocity,
+        correlation,
+        intensity,
+        goodPct,
+        threeBeam,
+        spikes,
+        bottomErrorVelocity,
+        bottomVerticalVelocity,
+        boatSpeed,
+        depthBeams,
+        minimumCells,
+        leaveOutTopM,
+        exclusions);
+  }
+
+  /** The same choices, with another fewest number of cells. */
+  public Screening withMinimumCells(int minimumCells) {
+    return new Screening(
+        errorVelocity,
+        verticalVelocity,
+        correlation,
+        intensity,
+        goodPct,
+        threeBeam,
+        spikes,
+        bottomErrorVelocity,
+        bottomVerticalVelocity,
+        boatSpeed,
+        depthBeams,
+        minimumCells,
+        leaveOutTopM,
+        exclusions);
+  }
+
+  /** The same choices, with another depth to leave out (m). */
+  public Screening withLeaveOutTopM(double leaveOutTopM) {
+    return new Screening(
+        errorVelocity,
+        verticalVelocity,
+        correlation,
+        intensity,
+        goodPct,
+        threeBeam,
+        spikes,
+        bottomErrorVelocity,
+        bottomVerticalVelocity,
+        boatSpeed,
+        depthBeams,
+        minimumCells,
+        leaveOutTopM,
+        exclusions);
+  }
+
+  /** The same choices, with other ensembles left out by hand. */
+  public Screening withExclusions(List<Exclusion> exclusions) {
+    return new Screening(
+        errorVelocity,
+        verticalVelocity,
+        correlation,
+        intensity,
+        goodPct,
+        threeBeam,
+        spikes,
+        bottomErrorVelocity,
+        bottomVerticalVelocity,
+        boatSpeed,
+        depthBeams,
+        minimumCells,
+        leaveOutTopM,
+        exclusions);
+  }
 }
