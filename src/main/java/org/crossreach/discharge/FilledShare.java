@@ -2,30 +2,48 @@ package org.crossreach.discharge;
 
 import org.crossreach.section.Section;
 
-/** How much of a pass's discharge rests on values that were filled in. */
-final class FilledShare {
+/**
+ * How much of the discharge between the edges rests on values that were filled in (%), by absolute
+ * discharge of each ensemble.
+ *
+ * <p>An ensemble counts once, by the first that applies: its whole column was filled in, its boat
+ * velocity was, its depth was; otherwise only what flows through the gaps between its cells counts.
+ *
+ * @param columnsPct columns without a usable cell, filled from the columns beside them
+ * @param boatVelocitiesPct boat velocities, filled in time
+ * @param depthsPct depths, filled along the track
+ * @param gapsPct gaps between usable cells, filled in depth
+ */
+public record FilledShare(
+    double columnsPct, double boatVelocitiesPct, double depthsPct, double gapsPct) {
 
-  private FilledShare() {}
+  /** Share that rests on anything filled in (%), 0 to 100; 0 when nothing flows. */
+  public double totalPct() {
+    return Math.min(100, columnsPct + boatVelocitiesPct + depthsPct + gapsPct);
+  }
 
-  /**
-   * Share of the discharge between the edges that rests on filled gaps between cells, filled
-   * columns, filled depths or filled boat velocities (%), by absolute discharge of each ensemble.
-   *
-   * @return 0 to 100; 0 when nothing flows
-   */
-  static double percent(ColumnDischarge columns) {
+  static FilledShare of(ColumnDischarge columns) {
     Section section = columns.section();
-    double filled = 0;
+    double inColumns = 0;
+    double inBoatVelocities = 0;
+    double inDepths = 0;
+    double inGaps = 0;
     double all = 0;
     for (int i = 0; i < section.size(); i++) {
       double total = Math.abs(columns.total(i));
       all += total;
-      if (!columns.transports().own(i) || section.depthFilled(i) || section.track().filled(i)) {
-        filled += total;
+      if (!columns.transports().own(i)) {
+        inColumns += total;
+      } else if (section.track().filled(i)) {
+        inBoatVelocities += total;
+      } else if (section.depthFilled(i)) {
+        inDepths += total;
       } else {
-        filled += Math.min(total, Math.abs(columns.ofGaps(i)));
+        inGaps += Math.min(total, Math.abs(columns.ofGaps(i)));
       }
     }
-    return all > 0 ? 100 * filled / all : 0;
+    double percent = all > 0 ? 100 / all : 0;
+    return new FilledShare(
+        percent * inColumns, percent * inBoatVelocities, percent * inDepths, percent * inGaps);
   }
 }

@@ -15,8 +15,7 @@ import org.crossreach.section.Section;
  * @param boatSpeedMps length of the boat's way over the duration (m/s)
  * @param durationS time from the first to the last ensemble (s)
  * @param usableCellsPct usable cells as a share of the recorded cells above the side-lobe limit (%)
- * @param filledDischargePct share of the discharge between the edges that rests on filled values
- *     (%)
+ * @param filled how much of the discharge between the edges rests on filled values
  */
 public record PassGeometry(
     double widthM,
@@ -25,7 +24,12 @@ public record PassGeometry(
     double boatSpeedMps,
     double durationS,
     double usableCellsPct,
-    double filledDischargePct) {
+    FilledShare filled) {
+
+  /** Share of the discharge between the edges that rests on filled values (%). */
+  public double filledDischargePct() {
+    return filled.totalPct();
+  }
 
   /** Mean depth: area over width (m). */
   public double meanDepthM() {
@@ -58,6 +62,6 @@ public record PassGeometry(
         section.track().lengthM(last) / duration,
         duration,
         section.pass().usableCellsPct(),
-        FilledShare.percent(columns));
+        FilledShare.of(columns));
   }
 }

@@ -70,7 +70,8 @@ final class PassLayer {
   }
 
   private Tracked track(Pass pass) {
-    ScreenedPass screened = Screen.apply(pass.ensembles(), measurement.instrument(), settings);
+    Screen screen = new Screen(measurement.instrument(), measurement.water(), settings);
+    ScreenedPass screened = screen.apply(pass.name(), pass.ensembles());
     return new Tracked(pass, screened, Track.of(screened));
   }
 

@@ -64,10 +64,10 @@ public final class EnsemblesCsv {
   private static void addCells(List<CsvTable.Column<Integer>> columns, ScreenedPass pass) {
     columns.add(new CsvTable.Column<>("cells", i -> Integer.toString(pass.ensembles().cells(i))));
     for (Reason reason : Reason.values()) {
-      if (reason != Reason.NO_CELL) {
+      if (reason != Reason.NO_CELL && reason.ofCells()) {
         String name = reason == Reason.NONE ? "usable" : reason.key().replace('-', '_');
         columns.add(
-            new CsvTable.Column<>("cells_" + name, i -> Integer.toString(count(pass, i, reason))));
+            new CsvTable.Column<>("cells_" + name, i -> Integer.toString(pass.cells(i, reason))));
       }
     }
   }
@@ -112,13 +112,5 @@ public final class EnsemblesCsv {
   private static String time(Ensembles ensembles, int i) {
     return DateTimeFormatter.ISO_OFFSET_DATE_TIME.format(
         ensembles.start().plusNanos(Math.round(1e9 * ensembles.elapsedS(i))));
-  }
-
-  private static int count(ScreenedPass pass, int ensemble, Reason reason) {
-    int count = 0;
-    for (int k = 0; k < pass.maxCells(); k++) {
-      count += pass.reason(ensemble, k) == reason ? 1 : 0;
-    }
-    return count;
   }
 }

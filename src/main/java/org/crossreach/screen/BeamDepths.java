@@ -1,69 +1,177 @@
 package org.crossreach.screen;
 
-import static org.crossreach.survey.EnsembleQuantity.DEPTH_BEAM_1_M;
-import static org.crossreach.survey.EnsembleQuantity.DEPTH_BEAM_2_M;
-import static org.crossreach.survey.EnsembleQuantity.DEPTH_BEAM_3_M;
-import static org.crossreach.survey.EnsembleQuantity.DEPTH_BEAM_4_M;
-import static org.crossreach.survey.EnsembleQuantity.DEPTH_VERTICAL_M;
-
+import java.util.List;
 import org.crossreach.settings.DepthSource;
+import org.crossreach.settings.Limit;
 import org.crossreach.survey.EnsembleQuantity;
 import org.crossreach.survey.Ensembles;
 
-/** Depths below the transducer face as the beams gave them. */
+/**
+ * Depths below the transducer face by the four slant beams and the vertical one, without the beams
+ * that stand apart.
+ *
+ * <p>A beam is left out of an ensemble when it departs, by more than the limit as a share of depth,
+ * both from the running median of its own neighbours in time and from the median of the ensemble's
+ * beams: on a steep bank the beams differ but each follows its own bed, at a step all beams step. A
+ * beam that departs from either by more than half the depth is left out on that alone: beams on a
+ * slope of 1:1 differ by a quarter. Two beams that differ do not outvote each other.
+ */
 final class BeamDepths {
 
-  private static final EnsembleQuantity[] SLANT = {
-    DEPTH_BEAM_1_M, DEPTH_BEAM_2_M, DEPTH_BEAM_3_M, DEPTH_BEAM_4_M
+  private static final EnsembleQuantity[] BEAMS = {
+    EnsembleQuantity.DEPTH_BEAM_1_M,
+    EnsembleQuantity.DEPTH_BEAM_2_M,
+    EnsembleQuantity.DEPTH_BEAM_3_M,
+    EnsembleQuantity.DEPTH_BEAM_4_M,
+    EnsembleQuantity.DEPTH_VERTICAL_M
   };
 
-  private BeamDepths() {}
+  private static final int SLANT_BEAMS = 4;
+  private static final int VERTICAL = 4;
+
+  /** Neighbours on either side with which a beam's depth is compared. */
+  private static final int REACH = 5;
+
+  /** Smallest automatic limit: the bed's own roughness under a beam's footprint. */
+  private static final double FLOOR_SHARE = 0.05;
+
+  /** Smallest departure (m) that the automatic screen takes for a fault in shallow water. */
+  private static final double FLOOR_M = 0.1;
+
+  /** Departure from one of the two medians that is enough alone, as a share of depth. */
+  private static final double ALONE_SHARE = 0.5;
+
+  private final double[][] depthM = new double[BEAMS.length][];
+  private final boolean[] recorded;
+  private long rejected;
 
   /**
-   * Depth below the face by the chosen beams, or by the others where the chosen ones have none (m).
+   * Reads and screens the beams.
    *
-   * @return one depth per ensemble, NaN where no beam has one
+   * @param sound what depths are multiplied by
+   * @param limit of the screen, as a share of depth (0.2 = 20 %)
+   * @param found receives the limit
    */
-  static double[] chosen(Ensembles ensembles, DepthSource source) {
-    double[] depth = new double[ensembles.size()];
-    for (int i = 0; i < depth.length; i++) {
-      double vertical = ensembles.value(DEPTH_VERTICAL_M, i);
-      double slant =
-          source == DepthSource.SLANT_INVERSE_DISTANCE
-              ? harmonicMean(ensembles, i)
-              : mean(ensembles, i);
-      double first = source == DepthSource.VERTICAL ? vertical : slant;
-      double second = source == DepthSource.VERTICAL ? slant : vertical;
-      depth[i] = Double.isNaN(first) ? second : first;
+  BeamDepths(Ensembles ensembles, SoundRatio sound, Limit limit, List<FoundLimit> found) {
+    int size = ensembles.size();
+    recorded = new boolean[size];
+    for (int b = 0; b < BEAMS.length; b++) {
+      depthM[b] = new double[size];
+      for (int i = 0; i < size; i++) {
+        depthM[b][i] = sound.at(i) * ensembles.value(BEAMS[b], i);
+        recorded[i] |= !Double.isNaN(depthM[b][i]);
+      }
     }
-    return depth;
+    if (AutomaticLimit.on(limit)) {
+      screen(limit, found);
+    }
   }
 
-  /**
-   * Shallowest valid depth of any beam below the face (m), linear in time where an ensemble has
-   * none.
-   */
-  static double[] shallowest(Ensembles ensembles) {
-    double[] depth = new double[ensembles.size()];
-    for (int i = 0; i < depth.length; i++) {
-      double least = ensembles.value(DEPTH_VERTICAL_M, i);
-      for (EnsembleQuantity beam : SLANT) {
-        double value = ensembles.value(beam, i);
-        if (!(value >= least)) {
-          least = Double.isNaN(value) ? least : value;
+  private void screen(Limit limit, List<FoundLimit> found) {
+    double[] middle = new double[recorded.length];
+    boolean[] majority = new boolean[recorded.length];
+    double[] valid = new double[BEAMS.length];
+    for (int i = 0; i < middle.length; i++) {
+      int count = 0;
+      for (double[] beam : depthM) {
+        if (!Double.isNaN(beam[i])) {
+          valid[count++] = beam[i];
         }
       }
-      depth[i] = least;
+      middle[i] = count > 1 ? Median.of(valid, count) : Double.NaN;
+      majority[i] = count > 2;
     }
-    return depth;
+    double[][] running = new double[BEAMS.length][];
+    for (int b = 0; b < BEAMS.length; b++) {
+      running[b] = RunningMedian.of(depthM[b], REACH);
+    }
+    boolean given = limit.kind() == Limit.Kind.GIVEN;
+    double share = given ? limit.value() : automaticShare(middle);
+    found.add(new FoundLimit(Criterion.DEPTH_BEAMS, limit.kind(), Double.NaN, share));
+    double least = given ? 0 : FLOOR_M;
+    for (int b = 0; b < BEAMS.length; b++) {
+      for (int i = 0; i < middle.length; i++) {
+        double own = Math.abs(depthM[b][i] - running[b][i]);
+        double others = Math.abs(depthM[b][i] - middle[i]);
+        boolean both =
+            own > Math.max(least, share * running[b][i])
+                && others > Math.max(least, share * middle[i]);
+        boolean alone =
+            own > ALONE_SHARE * running[b][i] || (majority[i] && others > ALONE_SHARE * middle[i]);
+        if (both || alone) {
+          depthM[b][i] = Double.NaN;
+          rejected++;
+        }
+      }
+    }
   }
 
-  /** Arithmetic mean of the valid slant beams (m), NaN when there is none. */
-  private static double mean(Ensembles ensembles, int i) {
+  /** The narrower of the two distributions decides: on a slope the beams differ, not in time. */
+  private double automaticShare(double[] middle) {
+    Sample own = new Sample();
+    Sample others = new Sample();
+    for (double[] beam : depthM) {
+      own.addScatter(beam, true);
+      for (int i = 0; i < middle.length; i++) {
+        others.add((beam[i] - middle[i]) / middle[i]);
+      }
+    }
+    double sigma = own.scale().sigma();
+    if (others.size() > 0) {
+      sigma = Math.min(sigma, others.scale().sigma());
+    }
+    return Math.max(FLOOR_SHARE, AutomaticLimit.SIGMAS * sigma);
+  }
+
+  /** Number of beam depths that were left out. */
+  long rejected() {
+    return rejected;
+  }
+
+  /** Why an ensemble has no depth, {@link Reason#NONE} when it has one. */
+  Reason reason(int ensemble) {
+    for (double[] beam : depthM) {
+      if (!Double.isNaN(beam[ensemble])) {
+        return Reason.NONE;
+      }
+    }
+    return recorded[ensemble] ? Reason.DEPTH_BEAMS : Reason.MISSING;
+  }
+
+  /** Depth below the face by the chosen beams alone (m), NaN when they have none. */
+  double by(DepthSource source, int ensemble) {
+    return switch (source) {
+      case SLANT_MEAN -> mean(ensemble);
+      case SLANT_INVERSE_DISTANCE -> harmonicMean(ensemble);
+      case VERTICAL -> depthM[VERTICAL][ensemble];
+    };
+  }
+
+  /**
+   * Depth below the face by the beams that stand in for the chosen ones where those have none (m):
+   * the vertical beam for the slant ones, the mean of the slant ones for the vertical beam.
+   */
+  double instead(DepthSource source, int ensemble) {
+    return source == DepthSource.VERTICAL ? mean(ensemble) : depthM[VERTICAL][ensemble];
+  }
+
+  /** Shallowest depth of any beam below the face (m), NaN where an ensemble has none. */
+  double[] shallowest() {
+    double[] least = new double[recorded.length];
+    for (int i = 0; i < least.length; i++) {
+      least[i] = Double.NaN;
+      for (double[] beam : depthM) {
+        least[i] = beam[i] < least[i] || Double.isNaN(least[i]) ? beam[i] : least[i];
+      }
+    }
+    return least;
+  }
+
+  private double mean(int i) {
     double sum = 0;
     int count = 0;
-    for (EnsembleQuantity beam : SLANT) {
-      double value = ensembles.value(beam, i);
+    for (int b = 0; b < SLANT_BEAMS; b++) {
+      double value = depthM[b][i];
       if (!Double.isNaN(value)) {
         sum += value;
         count++;
@@ -72,12 +180,11 @@ final class BeamDepths {
     return count == 0 ? Double.NaN : sum / count;
   }
 
-  /** Inverse-distance weighted mean of the valid slant beams (m), NaN when there is none. */
-  private static double harmonicMean(Ensembles ensembles, int i) {
+  private double harmonicMean(int i) {
     double sum = 0;
     int count = 0;
-    for (EnsembleQuantity beam : SLANT) {
-      double value = ensembles.value(beam, i);
+    for (int b = 0; b < SLANT_BEAMS; b++) {
+      double value = depthM[b][i];
       if (!Double.isNaN(value)) {
         sum += 1 / value;
         count++;

@@ -1,69 +1,60 @@
 package org.crossreach.screen;
 
 import java.util.List;
-import org.crossreach.survey.CellGrid;
-import org.crossreach.survey.CellQuantity;
-import org.crossreach.survey.EnsembleQuantity;
 import org.crossreach.survey.Ensembles;
 import org.crossreach.survey.Note;
 
 /**
  * The samples of one pass on true east and north, each with the reason why it is not used, if any.
  *
- * <p>Immutable; safe to share between threads.
+ * <p>Velocities, depths, first cell and cell size stand on the true speed of sound; recorded values
+ * stay as they are in {@link #ensembles()}. Immutable; safe to share between threads.
  */
 public final class ScreenedPass {
 
-  private final Ensembles ensembles;
-  private final double draftM;
-  private final NorthTurn turn;
+  private final CellFacts facts;
   private final double[] depthBelowFaceM;
-  private final double[] boatEastMps;
-  private final double[] boatNorthMps;
+  private final BottomTrack bottom;
+  private final byte[] depthReasons;
   private final byte[] reasons;
+  private final Accounting accounting;
   private final List<Note> notes;
-  private final CellGrid first;
-  private final CellGrid second;
 
   ScreenedPass(
-      Ensembles ensembles,
-      double draftM,
-      NorthTurn turn,
+      CellFacts facts,
       double[] depthBelowFaceM,
-      double[] boatEastMps,
-      double[] boatNorthMps,
+      BottomTrack bottom,
+      byte[] depthReasons,
       byte[] reasons,
+      Accounting accounting,
       List<Note> notes) {
-    this.ensembles = ensembles;
-    this.draftM = draftM;
-    this.turn = turn;
+    this.facts = facts;
     this.depthBelowFaceM = depthBelowFaceM;
-    this.boatEastMps = boatEastMps;
-    this.boatNorthMps = boatNorthMps;
+    this.bottom = bottom;
+    this.depthReasons = depthReasons;
     this.reasons = reasons;
+    this.accounting = accounting;
     this.notes = List.copyOf(notes);
-    this.first = ensembles.grid(CellQuantity.WATER_1);
-    this.second = ensembles.grid(CellQuantity.WATER_2);
   }
 
   /** What was recorded. */
   public Ensembles ensembles() {
-    return ensembles;
+    return facts.ensembles();
   }
 
   /** Number of ensembles. */
   public int size() {
-    return ensembles.size();
+    return facts.size();
   }
 
   /** Largest number of cells of an ensemble. */
   public int maxCells() {
-    return ensembles.maxCells();
+    return facts.cells();
   }
 
   /** Depth of the transducer face below the water surface (m). */
   public double draftM() {
-    return draftM;
+    return facts.draftM();
   }
 
   /** Depth of the bed below the transducer face (m), NaN when no beam has a usable one. */
@@ -71,26 +62,39 @@ public final class ScreenedPass {
     return depthBelowFaceM[ensemble];
   }
 
+  /** Why an ensemble has no depth, {@link Reason#NONE} when it has one. */
+  public Reason depthReason(int ensemble) {
+    return Reason.of(depthReasons[ensemble]);
+  }
+
   /** Eastward velocity of the boat over the bed (m/s, true north), NaN when not usable. */
   public double boatEastMps(int ensemble) {
-    return boatEastMps[ensemble];
+    return bottom.eastMps[ensemble];
   }
 
   /** Northward velocity of the boat over the bed (m/s, true north), NaN when not usable. */
   public double boatNorthMps(int ensemble) {
-    return boatNorthMps[ensemble];
+    return bottom.northMps[ensemble];
+  }
+
+  /** Why an ensemble's bottom-track velocity is not used, {@link Reason#NONE} when it is. */
+  public Reason bottomTrackReason(int ensemble) {
+    return Reason.of(bottom.reasons[ensemble]);
+  }
+
+  /** True over used speed of sound in an ensemble (1.01 → the sound was 1 % faster). */
+  public double soundRatio(int ensemble) {
+    return facts.sound().at(ensemble);
   }
 
   /** Depth of the upper edge of cell 0 below the water surface (m). */
   public double topOfCellsM(int ensemble) {
-    return draftM
-        + ensembles.value(EnsembleQuantity.FIRST_CELL_M, ensemble)
-        - 0.5 * cellSizeM(ensemble);
+    return draftM() + facts.firstCellM(ensemble) - 0.5 * facts.cellSizeM(ensemble);
   }
 
   /** Height of a cell (m). */
   public double cellSizeM(int ensemble) {
-    return ensembles.value(EnsembleQuantity.CELL_SIZE_M, ensemble);
+    return facts.cellSizeM(ensemble);
   }
 
   /** Whether a cell may be used. */
@@ -103,6 +107,15 @@ public final class ScreenedPass {
     return Reason.of(reasons[ensemble * maxCells() + cell]);
   }
 
+  /** Number of cells of an ensemble that carry a reason. */
+  public int cells(int ensemble, Reason reason) {
+    int count = 0;
+    for (int at = ensemble * maxCells(); at < (ensemble + 1) * maxCells(); at++) {
+      count += reasons[at] == reason.code() ? 1 : 0;
+    }
+    return count;
+  }
+
   /**
    * Reads the water velocities of an ensemble, usable or not.
    *
@@ -110,38 +123,37 @@ public final class ScreenedPass {
    * @param row receives them
    */
   public void read(int ensemble, VelocityRow row) {
-    first.copyRow(ensemble, row.east);
-    second.copyRow(ensemble, row.north);
-    for (int k = 0; k < row.east.length; k++) {
-      double east = row.east[k];
-      double north = row.north[k];
-      row.east[k] = turn.east(east, north);
-      row.north[k] = turn.north(east, north);
-    }
+    facts.water().read(ensemble, row, false);
   }
 
   /** Number of ensembles with at least one usable cell. */
   public int usableEnsembles() {
     int count = 0;
     for (int i = 0; i < size(); i++) {
-      boolean any = false;
-      for (int k = 0; k < maxCells() && !any; k++) {
-        any = usable(i, k);
-      }
-      count += any ? 1 : 0;
+      count += anyUsable(reasons, i, maxCells()) ? 1 : 0;
     }
     return count;
   }
 
+  static boolean anyUsable(byte[] reasons, int ensemble, int cells) {
+    for (int at = ensemble * cells; at < (ensemble + 1) * cells; at++) {
+      if (reasons[at] == 0) {
+        return true;
+      }
+    }
+    return false;
+  }
+
   /** Usable cells as a share of the recorded cells above the side-lobe limit (%), 0 when none. */
   public double usableCellsPct() {
-    long usable = 0;
-    long within = 0;
-    for (byte reason : reasons) {
-      usable += reason == 0 ? 1 : 0;
-      within += reason == Reason.NO_CELL.ordinal() || reason == Reason.SIDE_LOBE.ordinal() ? 0 : 1;
-    }
-    return within == 0 ? 0 : 100.0 * usable / within;
+    Tally cells = accounting.cells();
+    long within = cells.recorded() - cells.of(Reason.SIDE_LOBE);
+    return within == 0 ? 0 : 100.0 * cells.used() / within;
+  }
+
+  /** What became of the samples. */
+  public Accounting accounting() {
+    return accounting;
   }
 
   /** What is to be said about the samples. */

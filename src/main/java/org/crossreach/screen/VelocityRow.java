@@ -10,6 +10,9 @@ public final class VelocityRow {
 
   final double[] east;
   final double[] north;
+  final double[] up;
+  final double[] error;
+  final double[] rotation = new double[9];
 
   /**
    * Makes room.
@@ -19,6 +22,8 @@ public final class VelocityRow {
   public VelocityRow(int cells) {
     east = new double[cells];
     north = new double[cells];
+    up = new double[cells];
+    error = new double[cells];
   }
 
   /** Eastward velocity of the water relative to the boat (m/s). */

@@ -15,6 +15,7 @@ import org.crossreach.settings.Settings;
 import org.crossreach.survey.Bank;
 import org.crossreach.survey.Ensemble;
 import org.crossreach.survey.Instrument;
+import org.crossreach.survey.Water;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
 
@@ -110,7 +111,9 @@ class OneVerticalOracleTest {
     Ensemble end = new Ensemble(1, 1, 0, depth - draft, blank + cell / 2, cell, east, north);
     Instrument instrument = new Instrument("", 1200, beamAngle, List.of(), draft, Double.NaN, 0, 0);
     Settings settings = Settings.defaults().withScreening(Screening.off());
-    var screened = Screen.apply(Ensemble.record(List.of(start, end)), instrument, settings);
+    var screened =
+        new Screen(instrument, new Water(Double.NaN, 0), settings)
+            .apply("pass-01", Ensemble.record(List.of(start, end)));
     Track track = Track.of(screened);
     Section section = Section.of(screened, track, Line.along(track, Bank.LEFT), Bank.LEFT);
     Column column = section.newColumn();

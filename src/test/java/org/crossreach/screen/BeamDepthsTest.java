@@ -8,9 +8,11 @@ import static org.crossreach.survey.EnsembleQuantity.DEPTH_VERTICAL_M;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 
 import java.time.OffsetDateTime;
+import java.util.ArrayList;
 import java.util.EnumMap;
 import java.util.Map;
 import org.crossreach.settings.DepthSource;
+import org.crossreach.settings.Limit;
 import org.crossreach.survey.CellGrid;
 import org.crossreach.survey.CellQuantity;
 import org.crossreach.survey.EnsembleQuantity;
@@ -40,26 +42,33 @@ class BeamDepthsTest {
   void averagesTheSlantBeams(
       Double beam1, Double beam2, Double beam3, Double beam4, double mean, double harmonic) {
     Ensembles one = record(beam1, beam2, beam3, beam4, null);
-    assertEquals(mean, BeamDepths.chosen(one, DepthSource.SLANT_MEAN)[0], 0.6e-6);
-    assertEquals(harmonic, BeamDepths.chosen(one, DepthSource.SLANT_INVERSE_DISTANCE)[0], 0.6e-6);
+    assertEquals(mean, depth(one, DepthSource.SLANT_MEAN), 0.6e-6);
+    assertEquals(harmonic, depth(one, DepthSource.SLANT_INVERSE_DISTANCE), 0.6e-6);
   }
 
   @Test
   void verticalBeamStandsInForLostSlantBeamsAndTheOtherWayRound() {
     Ensembles noSlant = record(null, null, null, null, 3.0);
     Ensembles noVertical = record(4.0, null, 6.0, null, null);
-    assertEquals(3.0, BeamDepths.chosen(noSlant, DepthSource.SLANT_MEAN)[0]);
-    assertEquals(5.0, BeamDepths.chosen(noVertical, DepthSource.VERTICAL)[0]);
-    assertEquals(
-        Double.NaN,
-        BeamDepths.chosen(record(null, null, null, null, null), DepthSource.VERTICAL)[0]);
+    assertEquals(3.0, depth(noSlant, DepthSource.SLANT_MEAN));
+    assertEquals(5.0, depth(noVertical, DepthSource.VERTICAL));
+    assertEquals(Double.NaN, depth(record(null, null, null, null, null), DepthSource.VERTICAL));
   }
 
   @Test
   void shallowestBeamCountsForSideLobes() {
-    assertEquals(3.9, BeamDepths.shallowest(record(4.0, 5.0, 3.9, null, 4.2))[0]);
-    assertEquals(3.5, BeamDepths.shallowest(record(4.0, 5.0, 3.9, null, 3.5))[0]);
-    assertEquals(4.0, BeamDepths.shallowest(record(null, 5.0, null, 4.0, null))[0]);
+    assertEquals(3.9, beams(record(4.0, 5.0, 3.9, null, 4.2)).shallowest()[0]);
+    assertEquals(3.5, beams(record(4.0, 5.0, 3.9, null, 3.5)).shallowest()[0]);
+    assertEquals(4.0, beams(record(null, 5.0, null, 4.0, null)).shallowest()[0]);
+  }
+
+  private static BeamDepths beams(Ensembles ensembles) {
+    return new BeamDepths(ensembles, SoundRatio.NONE, Limit.OFF, new ArrayList<>());
+  }
+
+  private static double depth(Ensembles ensembles, DepthSource source) {
+    double chosen = beams(ensembles).by(source, 0);
+    return Double.isNaN(chosen) ? beams(ensembles).instead(source, 0) : chosen;
   }
 
   private static Ensembles record(

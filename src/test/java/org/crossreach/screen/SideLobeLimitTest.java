@@ -7,6 +7,7 @@ import org.crossreach.settings.Screening;
 import org.crossreach.settings.Settings;
 import org.crossreach.survey.Ensemble;
 import org.crossreach.survey.Instrument;
+import org.crossreach.survey.Water;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
 
@@ -39,10 +40,11 @@ class SideLobeLimitTest {
     double firstCell = lowerEdge - size / 2 - draft;
     Ensemble ensemble =
         new Ensemble(0, 1, 0, depth - draft, firstCell, size, new double[] {0.1}, new double[] {1});
-    return Screen.apply(
-            Ensemble.record(List.of(ensemble)),
+    return new Screen(
             new Instrument("", 1200, beamAngle, List.of(), draft, Double.NaN, 0, 0),
+            new Water(Double.NaN, 0),
             Settings.defaults().withScreening(Screening.off()))
+        .apply("pass-01", Ensemble.record(List.of(ensemble)))
         .reason(0, 0);
   }
 }
