@@ -12,9 +12,10 @@ import org.crossreach.survey.Ensembles;
  *
  * <p>A beam is left out of an ensemble when it departs, by more than the limit as a share of depth,
  * both from the running median of its own neighbours in time and from the median of the ensemble's
- * beams: on a steep bank the beams differ but each follows its own bed, at a step all beams step. A
- * beam that departs from either by more than half the depth is left out on that alone: beams on a
- * slope of 1:1 differ by a quarter. Two beams that differ do not outvote each other.
+ * beams: on a steep bank the beams differ but each follows its own bed, at a step all beams step.
+ * It is left out, too, when it departs by more than half the depth from the median of at least
+ * three beams (those on a slope of 1:1 differ by a quarter), or from what it saw both before and
+ * after. Two beams that differ do not outvote each other.
  */
 final class BeamDepths {
 
@@ -29,8 +30,11 @@ final class BeamDepths {
   private static final int SLANT_BEAMS = 4;
   private static final int VERTICAL = 4;
 
-  /** Neighbours on either side with which a beam's depth is compared. */
+  /** Neighbours on either side that a beam's running median takes. */
   private static final int REACH = 5;
+
+  /** Neighbours on one side that tell what a beam saw before, or after. */
+  private static final int BESIDE = 3;
 
   /** Smallest automatic limit: the bed's own roughness under a beam's footprint. */
   private static final double FLOOR_SHARE = 0.05;
@@ -38,7 +42,7 @@ final class BeamDepths {
   /** Smallest departure (m) that the automatic screen takes for a fault in shallow water. */
   private static final double FLOOR_M = 0.1;
 
-  /** Departure from one of the two medians that is enough alone, as a share of depth. */
+  /** Departure that is enough alone, as a share of depth. */
   private static final double ALONE_SHARE = 0.5;
 
   private final double[][] depthM = new double[BEAMS.length][];
@@ -81,29 +85,37 @@ final class BeamDepths {
       middle[i] = count > 1 ? Median.of(valid, count) : Double.NaN;
       majority[i] = count > 2;
     }
-    double[][] running = new double[BEAMS.length][];
-    for (int b = 0; b < BEAMS.length; b++) {
-      running[b] = RunningMedian.of(depthM[b], REACH);
-    }
     boolean given = limit.kind() == Limit.Kind.GIVEN;
     double share = given ? limit.value() : automaticShare(middle);
     found.add(new FoundLimit(Criterion.DEPTH_BEAMS, limit.kind(), Double.NaN, share));
     double least = given ? 0 : FLOOR_M;
-    for (int b = 0; b < BEAMS.length; b++) {
+    for (double[] beam : depthM) {
+      double[] running = RunningMedian.of(beam, REACH);
+      double[] before = RunningMedian.beside(beam, BESIDE, -1);
+      double[] after = RunningMedian.beside(beam, BESIDE, 1);
       for (int i = 0; i < middle.length; i++) {
-        double own = Math.abs(depthM[b][i] - running[b][i]);
-        double others = Math.abs(depthM[b][i] - middle[i]);
-        boolean both =
-            own > Math.max(least, share * running[b][i])
-                && others > Math.max(least, share * middle[i]);
-        boolean alone =
-            own > ALONE_SHARE * running[b][i] || (majority[i] && others > ALONE_SHARE * middle[i]);
-        if (both || alone) {
-          depthM[b][i] = Double.NaN;
+        boolean apart =
+            departs(beam[i], running[i], share, least) && departs(beam[i], middle[i], share, least);
+        boolean farApart =
+            majority[i] && departs(beam[i], middle[i], ALONE_SHARE, 0)
+                || juts(beam[i], before[i], after[i]);
+        if (apart || farApart) {
+          beam[i] = Double.NaN;
           rejected++;
         }
       }
     }
+  }
+
+  /** Whether a depth is by far greater, or by far smaller, than both before and after. */
+  private static boolean juts(double depth, double before, double after) {
+    double least = Math.min(before, after);
+    double most = Math.max(before, after);
+    return depth > (1 + ALONE_SHARE) * most || depth < (1 - ALONE_SHARE) * least;
+  }
+
+  private static boolean departs(double depth, double from, double share, double least) {
+    return Math.abs(depth - from) > Math.max(least, share * from);
   }
 
   /** The narrower of the two distributions decides: on a slope the beams differ, not in time. */

@@ -146,12 +146,11 @@ final class BottomTrack {
       return;
     }
     VectorJumps jumps = new VectorJumps(accepted(eastMps), accepted(northMps));
-    double value =
-        limit.kind() == Limit.Kind.GIVEN
-            ? limit.value()
-            : jumps.automatic(BOAT_FLOOR_MPS, BOAT_FLOOR_SHARE);
+    boolean given = limit.kind() == Limit.Kind.GIVEN;
+    double least = Math.max(BOAT_FLOOR_MPS, BOAT_FLOOR_SHARE * jumps.medianLength());
+    double value = given ? limit.value() : jumps.automatic(least);
     found.add(new FoundLimit(Criterion.BOAT_SPEED, limit.kind(), Double.NaN, value));
-    boolean[] beyond = jumps.beyond(value);
+    boolean[] beyond = jumps.beyond(value, given ? value : least);
     for (int i = 0; i < beyond.length; i++) {
       if (beyond[i]) {
         reasons[i] = Reason.BOAT_SPEED.code();

@@ -41,4 +41,30 @@ final class RunningMedian {
     }
     return result;
   }
+
+  /**
+   * The median of the values on one side of each value.
+   *
+   * @param values the column, NaN where missing
+   * @param count most values taken, at least 1
+   * @param way -1 for those before, 1 for those after
+   * @return as many values, NaN where the column has none on that side
+   */
+  static double[] beside(double[] values, int count, int way) {
+    double[] window = new double[count];
+    double[] last = new double[count];
+    double[] result = new double[values.length];
+    int seen = 0;
+    int first = way < 0 ? 0 : values.length - 1;
+    for (int i = first; i >= 0 && i < values.length; i -= way) {
+      int size = Math.min(seen, count);
+      System.arraycopy(last, 0, window, 0, size);
+      result[i] = Median.of(window, size);
+      if (!Double.isNaN(values[i])) {
+        last[seen % count] = values[i];
+        seen++;
+      }
+    }
+    return result;
+  }
 }

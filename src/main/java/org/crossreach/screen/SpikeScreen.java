@@ -3,32 +3,32 @@ package org.crossreach.screen;
 /**
  * Compares each cell with its neighbours in time and depth.
  *
- * <p>Cells are compared relative to the middle of their own ensemble, so that neither the boat's
- * own motion nor its error shows; an ensemble with fewer than four used cells has no middle worth
- * the name and is compared as it is, over the ground. Neighbours are the cells of the same depth in
- * the three ensembles before and after, and, where the ensemble has usable cells both above and
- * below, those above and below in the ensemble itself and in the one before and after: at most
- * twelve. Depth counts on both sides or not at all, so that the shear near the bed is no departure.
- * A cell with fewer than three neighbours is not judged. The departure is the length of the vector
- * from the component-wise median of the neighbours. One screen belongs to one thread.
+ * <p>Cells are compared in two ways: relative to the middle of their own ensemble, so that neither
+ * the boat's own motion nor its error shows; and over the ground, where the boat's velocity is
+ * known, so that an ensemble that is bad in half of its cells shows. An ensemble with fewer than
+ * four used cells has no middle worth the name and is compared over the ground alone.
+ *
+ * <p>Neighbours are the cells of the same depth in the three ensembles before and after, and, where
+ * the ensemble has usable cells both above and below, those above and below in the ensemble itself
+ * and in the one before and after: at most twelve. Depth counts on both sides or not at all, so
+ * that the shear near the bed is no departure. The departure is the length of the vector from the
+ * component-wise median of the neighbours. Where velocity changes across, as on a steep bank, what
+ * that explains is allowed on top of the least limit. A cell with fewer than three neighbours is
+ * not judged. One screen belongs to one thread.
  */
 final class SpikeScreen {
 
+  private static final int REACH = RowWindow.REACH;
   private static final int FEWEST_NEIGHBOURS = 3;
   private static final int FEWEST_CELLS = 4;
   private static final double HALF_SQRT_2 = Math.sqrt(0.5);
 
   private final CellFacts facts;
   private final RowWindow window;
-  private final double[][] east = new double[2 * RowWindow.REACH + 1][];
-  private final double[][] north = new double[2 * RowWindow.REACH + 1][];
-  private final double[][] shiftedEast;
-  private final double[][] shiftedNorth;
-  private final double[] offsetEast = new double[east.length];
-  private final double[] offsetNorth = new double[north.length];
+  private final AlignedRows rows;
   private final double[] nearEast = new double[12];
   private final double[] nearNorth = new double[12];
-  private boolean asTheyAre;
+  private boolean hasMiddle;
   private int neighbours;
   private double departureEast;
   private double departureNorth;
@@ -36,72 +36,91 @@ final class SpikeScreen {
   SpikeScreen(CellFacts facts, RowWindow window) {
     this.facts = facts;
     this.window = window;
-    shiftedEast = new double[east.length][facts.cells()];
-    shiftedNorth = new double[north.length][facts.cells()];
+    this.rows = new AlignedRows(facts, window);
   }
 
   /** Prepares the ensemble whose cells are to be compared. */
   void centreOn(int ensemble) {
-    window.centreOn(ensemble);
-    asTheyAre = window.used(ensemble) < FEWEST_CELLS && facts.boatKnown();
-    for (int d = -RowWindow.REACH; d <= RowWindow.REACH; d++) {
-      int other = ensemble + d;
-      int at = d + RowWindow.REACH;
-      boolean there = other >= 0 && other < facts.size();
-      east[at] = there ? window.east(other) : null;
-      north[at] = there ? window.north(other) : null;
-      if (there) {
-        offsetEast[at] = asTheyAre ? 0 : window.middleEast(other);
-        offsetNorth[at] = asTheyAre ? 0 : window.middleNorth(other);
-        if (!sameCells(ensemble, other)) {
-          shift(ensemble, other, at);
+    rows.centreOn(ensemble);
+    hasMiddle = window.used(ensemble) >= FEWEST_CELLS || !facts.boatKnown();
+  }
+
+  /**
+   * Marks the cells of the ensemble that depart from their neighbours.
+   *
+   * @param limits largest departures (m/s), NaN where nothing is known to judge by
+   * @param reasons reasons of the ensemble's cells; a used one that departs becomes a spike
+   */
+  void mark(SpikeLimits limits, byte[] reasons) {
+    for (boolean toMiddle : new boolean[] {true, false}) {
+      if (!compares(toMiddle)) {
+        continue;
+      }
+      double limit = toMiddle ? limits.relative() : limits.overGround();
+      rows.relative(toMiddle);
+      for (int k = 0; k < reasons.length; k++) {
+        if (reasons[k] == 0 && departs(k, limit, limits.least())) {
+          reasons[k] = Reason.SPIKE.code();
         }
       }
     }
   }
 
-  private boolean sameCells(int a, int b) {
-    return facts.firstCellM(a) == facts.firstCellM(b) && facts.cellSizeM(a) == facts.cellSizeM(b);
+  /** Whether the ensemble's cells can be compared in a way. */
+  private boolean compares(boolean toMiddle) {
+    return toMiddle ? hasMiddle : facts.boatKnown();
   }
 
-  /** Takes from an ensemble with other cells those that hold the centres of this one's cells. */
-  private void shift(int ensemble, int other, int at) {
-    double first = facts.firstCellM(ensemble);
-    double size = facts.cellSizeM(ensemble);
-    double otherTop = facts.firstCellM(other) - 0.5 * facts.cellSizeM(other);
-    double otherSize = facts.cellSizeM(other);
-    for (int k = 0; k < facts.cells(); k++) {
-      int cell = (int) Math.floor((first + k * size - otherTop) / otherSize);
-      boolean there = cell >= 0 && cell < facts.cells();
-      shiftedEast[at][k] = there ? east[at][cell] : Double.NaN;
-      shiftedNorth[at][k] = there ? north[at][cell] : Double.NaN;
-    }
-    east[at] = shiftedEast[at];
-    north[at] = shiftedNorth[at];
-  }
-
-  /** Whether the ensemble's cells are compared as they are, over the ground. */
-  boolean asTheyAre() {
-    return asTheyAre;
-  }
-
-  /** Whether a usable cell departs from its neighbours by more than a limit (m/s). */
-  boolean departs(int cell, double limit) {
+  private boolean departs(int cell, double limit, double least) {
     collect(cell);
     if (neighbours < FEWEST_NEIGHBOURS || agrees(cell, limit * HALF_SQRT_2)) {
       return false;
     }
     compare(cell);
-    return departureEast * departureEast + departureNorth * departureNorth > limit * limit;
+    return length(departureEast, departureNorth) > Math.max(limit, least + changeAcross(cell));
+  }
+
+  /**
+   * How far a cell may lie from the median of its neighbours because velocity changes across (m/s):
+   * half of the change from one side to the other; where there is one side alone, as at the foot of
+   * a bank, one and a half times the change along it, since near the bed velocity changes ever
+   * faster.
+   */
+  private double changeAcross(int cell) {
+    boolean before = side(cell, -1);
+    double beforeEast = Median.of(nearEast, neighbours);
+    double beforeNorth = Median.of(nearNorth, neighbours);
+    if (before && side(cell, 1)) {
+      double afterEast = Median.of(nearEast, neighbours);
+      double afterNorth = Median.of(nearNorth, neighbours);
+      return 0.5 * length(afterEast - beforeEast, afterNorth - beforeNorth);
+    }
+    if (!side(cell, before ? -1 : 1)) {
+      return 0;
+    }
+    int far = neighbours - 1;
+    return 1.5 * length(nearEast[far] - nearEast[0], nearNorth[far] - nearNorth[0]);
+  }
+
+  /** Collects the cells of one side from the nearest on; returns whether there is one. */
+  private boolean side(int cell, int way) {
+    neighbours = 0;
+    for (int d = 1; d <= REACH; d++) {
+      take(way * d, cell);
+    }
+    return neighbours > 0;
   }
 
   /**
    * Measures the departure of a usable cell into {@link #departureEast()} and {@link
-   * #departureNorth()}, NaN when it has too few neighbours.
+   * #departureNorth()}, NaN when it has too few neighbours or cannot be compared in this way.
+   *
+   * @param toMiddle whether relative to the middle of its ensemble, else over the ground
    */
-  void measure(int cell) {
+  void measure(int cell, boolean toMiddle) {
+    rows.relative(toMiddle);
     collect(cell);
-    if (neighbours < FEWEST_NEIGHBOURS) {
+    if (neighbours < FEWEST_NEIGHBOURS || !compares(toMiddle)) {
       departureEast = Double.NaN;
       departureNorth = Double.NaN;
     } else {
@@ -110,12 +129,12 @@ final class SpikeScreen {
   }
 
   /**
-   * Measures the departure of the middle of the ensemble from those of its neighbours into {@link
+   * Measures the departure of the middle of an ensemble from those of its neighbours into {@link
    * #departureEast()} and {@link #departureNorth()}, NaN when it has too few neighbours.
    */
   void measureMiddle(int ensemble) {
     neighbours = 0;
-    for (int d = -RowWindow.REACH; d <= RowWindow.REACH; d++) {
+    for (int d = -REACH; d <= REACH; d++) {
       int other = ensemble + d;
       if (d != 0 && other >= 0 && other < facts.size() && window.used(other) > 0) {
         nearEast[neighbours] = window.middleEast(other);
@@ -138,17 +157,26 @@ final class SpikeScreen {
     return departureNorth;
   }
 
-  private double ownEast(int cell) {
-    return east[RowWindow.REACH][cell] - offsetEast[RowWindow.REACH];
+  private void collect(int cell) {
+    neighbours = 0;
+    for (int d = 1; d <= REACH; d++) {
+      take(-d, cell);
+      take(d, cell);
+    }
+    if (rows.has(0, cell - 1) && rows.has(0, cell + 1)) {
+      for (int d = -1; d <= 1; d++) {
+        take(d, cell - 1);
+        take(d, cell + 1);
+      }
+    }
   }
 
-  private double ownNorth(int cell) {
-    return north[RowWindow.REACH][cell] - offsetNorth[RowWindow.REACH];
-  }
-
-  private void compare(int cell) {
-    departureEast = ownEast(cell) - Median.of(nearEast, neighbours);
-    departureNorth = ownNorth(cell) - Median.of(nearNorth, neighbours);
+  private void take(int d, int cell) {
+    if (rows.has(d, cell)) {
+      nearEast[neighbours] = rows.east(d, cell);
+      nearNorth[neighbours] = rows.north(d, cell);
+      neighbours++;
+    }
   }
 
   /**
@@ -156,8 +184,8 @@ final class SpikeScreen {
    * too: this settles nearly every cell without a median.
    */
   private boolean agrees(int cell, double near) {
-    double e = ownEast(cell);
-    double n = ownNorth(cell);
+    double e = rows.east(0, cell);
+    double n = rows.north(0, cell);
     int count = 0;
     for (int j = 0; j < neighbours; j++) {
       if (Math.abs(nearEast[j] - e) <= near && Math.abs(nearNorth[j] - n) <= near) {
@@ -167,34 +195,12 @@ final class SpikeScreen {
     return 2 * count > neighbours;
   }
 
-  private void collect(int cell) {
-    neighbours = 0;
-    double[] own = east[RowWindow.REACH];
-    boolean inside =
-        cell > 0
-            && cell + 1 < own.length
-            && !Double.isNaN(own[cell - 1])
-            && !Double.isNaN(own[cell + 1]);
-    for (int at = 0; at < east.length; at++) {
-      if (east[at] == null) {
-        continue;
-      }
-      if (at != RowWindow.REACH) {
-        take(at, cell);
-      }
-      if (inside && Math.abs(at - RowWindow.REACH) <= 1) {
-        take(at, cell - 1);
-        take(at, cell + 1);
-      }
-    }
+  private void compare(int cell) {
+    departureEast = rows.east(0, cell) - Median.of(nearEast, neighbours);
+    departureNorth = rows.north(0, cell) - Median.of(nearNorth, neighbours);
   }
 
-  private void take(int at, int cell) {
-    double e = east[at][cell];
-    if (!Double.isNaN(e)) {
-      nearEast[neighbours] = e - offsetEast[at];
-      nearNorth[neighbours] = north[at][cell] - offsetNorth[at];
-      neighbours++;
-    }
+  private static double length(double x, double y) {
+    return Math.sqrt(x * x + y * y);
   }
 }

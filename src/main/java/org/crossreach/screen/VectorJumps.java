@@ -1,12 +1,15 @@
 package org.crossreach.screen;
 
+import java.util.Arrays;
+
 /**
  * Horizontal vectors in time, of which some jump out of line.
  *
  * <p>A vector jumps when it departs by more than a limit from the running median, by component, and
- * by more than two fifths of it from the mean of its two neighbours: a step or a steady change
- * departs from neither, a sharp turn only from the first; of two jumps in a row each is half of
- * what the other departs by. Missing vectors are passed over. The first and the last vector are not
+ * by more than a share of the limit both from the mean of its two neighbours and from the cubic
+ * through its four neighbours: a step or a steady change departs from none of them, a turn or a
+ * wave not from the cubic. The search is made twice, so that of two jumps in a row the one that hid
+ * behind the other is found. Missing vectors are passed over. The first and the last vector are not
  * judged.
  */
 final class VectorJumps {
@@ -15,15 +18,13 @@ final class VectorJumps {
   private static final int REACH = 3;
 
   /**
-   * Departure from the mean of the neighbours that counts, as a share of the limit. Of two equal
-   * jumps in a row each departs by half.
+   * Departure from what the neighbours lead to expect, as a share of the limit. Of two equal jumps
+   * in a row each departs by half of its size from the mean and by a third from the cubic.
    */
-  private static final double BESIDE_SHARE = 0.4;
+  private static final double BESIDE_SHARE = 0.3;
 
   private final double[] east;
   private final double[] north;
-  private final double[] middleEast;
-  private final double[] middleNorth;
 
   /**
    * Takes the vectors (m/s); both components are NaN where one is missing.
@@ -34,8 +35,6 @@ final class VectorJumps {
   VectorJumps(double[] east, double[] north) {
     this.east = east;
     this.north = north;
-    middleEast = RunningMedian.of(east, REACH);
-    middleNorth = RunningMedian.of(north, REACH);
   }
 
   /**
@@ -44,18 +43,18 @@ final class VectorJumps {
    * vectors.
    *
    * @param least smallest limit (m/s)
-   * @param leastShare smallest limit as a share of the median length
    */
-  double automatic(double least, double leastShare) {
+  double automatic(double least) {
+    return AutomaticLimit.vector(scatter(east), scatter(north), least);
+  }
+
+  /** Median length of the vectors (m/s), NaN of none. */
+  double medianLength() {
     Sample lengths = new Sample();
     for (int i = 0; i < east.length; i++) {
       lengths.add(length(east[i], north[i]));
     }
-    if (lengths.size() == 0) {
-      return Double.NaN;
-    }
-    double floor = Math.max(least, leastShare * lengths.median());
-    return AutomaticLimit.vector(scatter(east), scatter(north), floor);
+    return lengths.median();
   }
 
   private static RobustScale scatter(double[] values) {
@@ -64,30 +63,78 @@ final class VectorJumps {
     return sample.scale();
   }
 
-  /** Which vectors jump by more than a limit (m/s). */
-  boolean[] beyond(double limit) {
+  /**
+   * Which vectors jump.
+   *
+   * @param limit largest departure (m/s)
+   * @param least limit (m/s) on top of which change across is allowed
+   */
+  boolean[] beyond(double limit, double least) {
+    boolean[] first = search(limit, least);
+    double[] restEast = east.clone();
+    double[] restNorth = north.clone();
+    for (int i = 0; i < first.length; i++) {
+      if (first[i]) {
+        restEast[i] = Double.NaN;
+        restNorth[i] = Double.NaN;
+      }
+    }
+    boolean[] second = new VectorJumps(restEast, restNorth).search(limit, least);
+    for (int i = 0; i < first.length; i++) {
+      first[i] |= second[i];
+    }
+    return first;
+  }
+
+  private boolean[] search(double limit, double least) {
+    double[] middleEast = RunningMedian.of(east, REACH);
+    double[] middleNorth = RunningMedian.of(north, REACH);
+    double[] beforeEast = RunningMedian.beside(east, REACH, -1);
+    double[] beforeNorth = RunningMedian.beside(north, REACH, -1);
+    double[] afterEast = RunningMedian.beside(east, REACH, 1);
+    double[] afterNorth = RunningMedian.beside(north, REACH, 1);
+    int[] present = present();
     boolean[] jumps = new boolean[east.length];
-    int before = -1;
-    int here = -1;
-    for (int after = 0; after < east.length; after++) {
-      if (Double.isNaN(east[after])) {
-        continue;
-      }
-      if (before >= 0) {
-        double beside = departureFromMean(before, here, after);
-        double running = length(east[here] - middleEast[here], north[here] - middleNorth[here]);
-        jumps[here] = running > limit && beside > BESIDE_SHARE * limit;
-      }
-      before = here;
-      here = after;
+    for (int p = 1; p + 1 < present.length; p++) {
+      int i = present[p];
+      double change = length(afterEast[i] - beforeEast[i], afterNorth[i] - beforeNorth[i]);
+      jumps[i] =
+          length(east[i] - middleEast[i], north[i] - middleNorth[i])
+                  > Math.max(limit, least + 0.5 * change)
+              && fromMean(present, p) > BESIDE_SHARE * limit
+              && (p < 2 || p + 2 >= present.length || fromCubic(present, p) > BESIDE_SHARE * limit);
     }
     return jumps;
   }
 
-  private double departureFromMean(int before, int here, int after) {
+  private int[] present() {
+    int[] present = new int[east.length];
+    int size = 0;
+    for (int i = 0; i < east.length; i++) {
+      if (!Double.isNaN(east[i])) {
+        present[size++] = i;
+      }
+    }
+    return Arrays.copyOf(present, size);
+  }
+
+  private double fromMean(int[] present, int p) {
+    int here = present[p];
+    int before = present[p - 1];
+    int after = present[p + 1];
     return length(
         east[here] - 0.5 * (east[before] + east[after]),
         north[here] - 0.5 * (north[before] + north[after]));
+  }
+
+  private double fromCubic(int[] present, int p) {
+    return length(fromCubic(east, present, p), fromCubic(north, present, p));
+  }
+
+  private static double fromCubic(double[] values, int[] present, int p) {
+    double near = values[present[p - 1]] + values[present[p + 1]];
+    double far = values[present[p - 2]] + values[present[p + 2]];
+    return values[present[p]] - (4 * near - far) / 6;
   }
 
   private static double length(double x, double y) {

@@ -20,7 +20,7 @@ final class WaterScreen {
   private static final double FLOOR_MPS = 0.05;
 
   /** Smallest automatic limit of a spike (m/s). */
-  private static final double SPIKE_FLOOR_MPS = 0.05;
+  private static final double SPIKE_FLOOR_MPS = 0.08;
 
   /**
    * Smallest automatic limit of a spike as a share of the median speed of the water: the intensity
@@ -170,47 +170,36 @@ final class WaterScreen {
     return value;
   }
 
-  /**
-   * Limits of spikes (m/s).
-   *
-   * @param cell for a cell relative to the middle of its ensemble
-   * @param ensemble for the middle of an ensemble, and for a cell over the ground
-   */
-  private record SpikeLimits(double cell, double ensemble) {}
-
   private SpikeLimits spikeLimits(CellJudge judge) {
     Limit limit = screening.spikes();
     if (!AutomaticLimit.on(limit)) {
-      return new SpikeLimits(Double.NaN, Double.NaN);
+      return SpikeLimits.NONE;
     }
     SpikeLimits limits =
-        limit.kind() == Limit.Kind.GIVEN
-            ? new SpikeLimits(limit.value(), limit.value())
-            : automaticSpikes(judge);
-    found.add(new FoundLimit(Criterion.SPIKES, limit.kind(), Double.NaN, limits.cell()));
+        limit.kind() == Limit.Kind.GIVEN ? SpikeLimits.of(limit.value()) : automaticSpikes(judge);
+    found.add(new FoundLimit(Criterion.SPIKES, limit.kind(), Double.NaN, limits.reported()));
     return limits;
   }
 
   private SpikeLimits automaticSpikes(CellJudge judge) {
     RowWindow window = new RowWindow(facts, judge);
     SpikeScreen spikes = new SpikeScreen(facts, window);
-    Sample east = new Sample();
-    Sample north = new Sample();
-    Sample middleEast = new Sample();
-    Sample middleNorth = new Sample();
+    Departures relative = new Departures(spikes);
+    Departures overGround = new Departures(spikes);
+    Departures middles = new Departures(spikes);
     Sample speeds = new Sample();
     for (int i = 0; i < facts.size(); i += stride) {
       spikes.centreOn(i);
       for (int k = 0; k < facts.cells(); k++) {
-        if (window.reasons(i)[k] == 0 && !spikes.asTheyAre()) {
-          spikes.measure(k);
-          east.add(spikes.departureEast());
-          north.add(spikes.departureNorth());
+        if (window.reasons(i)[k] == 0) {
+          spikes.measure(k, true);
+          relative.add();
+          spikes.measure(k, false);
+          overGround.add();
         }
       }
       spikes.measureMiddle(i);
-      middleEast.add(spikes.departureEast());
-      middleNorth.add(spikes.departureNorth());
+      middles.add();
       double e = window.middleEast(i);
       double n = window.middleNorth(i);
       speeds.add(Math.sqrt(e * e + n * n));
@@ -219,12 +208,24 @@ final class WaterScreen {
         facts.boatKnown()
             ? Math.max(SPIKE_FLOOR_MPS, SPIKE_FLOOR_SHARE * speeds.median())
             : SPIKE_FLOOR_WITHOUT_BOAT_MPS;
-    double middle = AutomaticLimit.vector(middleEast.scale(), middleNorth.scale(), floor);
-    if (east.size() == 0) {
-      return new SpikeLimits(middle, middle);
+    return new SpikeLimits(
+        relative.limit(floor), overGround.limit(floor), middles.limit(floor), floor);
+  }
+
+  /** Departures as the spike screen measured them last. */
+  private record Departures(SpikeScreen spikes, Sample east, Sample north) {
+    Departures(SpikeScreen spikes) {
+      this(spikes, new Sample(), new Sample());
     }
-    double cell = AutomaticLimit.vector(east.scale(), north.scale(), floor);
-    return new SpikeLimits(cell, Math.max(cell, middle));
+
+    void add() {
+      east.add(spikes.departureEast());
+      north.add(spikes.departureNorth());
+    }
+
+    double limit(double floor) {
+      return AutomaticLimit.vector(east.scale(), north.scale(), floor);
+    }
   }
 
   private void judgeAll(CellJudge judge, SpikeLimits limits) {
@@ -232,26 +233,26 @@ final class WaterScreen {
     SpikeScreen spikes = new SpikeScreen(facts, window);
     int cells = facts.cells();
     int[] three = new int[facts.size()];
+    byte[] why = new byte[cells];
     double[] middleEast = new double[facts.size()];
     double[] middleNorth = new double[facts.size()];
     for (int i = 0; i < facts.size(); i++) {
       spikes.centreOn(i);
-      double limit = spikes.asTheyAre() ? limits.ensemble() : limits.cell();
-      byte[] why = window.reasons(i);
+      System.arraycopy(window.reasons(i), 0, why, 0, cells);
+      if (!Double.isNaN(limits.least())) {
+        spikes.mark(limits, why);
+      }
       boolean[] withoutError = window.withoutError(i);
       for (int k = 0; k < cells; k++) {
-        byte reason = why[k];
-        if (reason == 0 && !Double.isNaN(limit) && spikes.departs(k, limit)) {
-          reason = Reason.SPIKE.code();
-        }
-        reasons[i * cells + k] = reason;
-        three[i] += reason == 0 && withoutError[k] ? 1 : 0;
+        three[i] += why[k] == 0 && withoutError[k] ? 1 : 0;
       }
+      System.arraycopy(why, 0, reasons, i * cells, cells);
       middleEast[i] = window.middleEast(i);
       middleNorth[i] = window.middleNorth(i);
     }
     if (facts.boatKnown() && !Double.isNaN(limits.ensemble())) {
-      boolean[] jumps = new VectorJumps(middleEast, middleNorth).beyond(limits.ensemble());
+      boolean[] jumps =
+          new VectorJumps(middleEast, middleNorth).beyond(limits.ensemble(), limits.least());
       for (int i = 0; i < jumps.length; i++) {
         if (jumps[i]) {
           leaveOut(i, Reason.SPIKE);

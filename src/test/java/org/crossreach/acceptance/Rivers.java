@@ -15,11 +15,11 @@ final class Rivers {
         "vertical": %VERTICAL%, "skew_deg": %SKEW%},
        "boat": {"ensemble_s": 1, "ensembles": 600, "hold_ensembles": 12, "speed_change": 0.2,
                 "wobble_m": %WOBBLE%, "wobbles": 2.5, "left_edge_m": 4, "right_edge_m": 2},
-       "attitude": {"heading_deg": 200, "heading_swing_deg": 10, "pitch_deg": 0, "roll_deg": 0},
+       "attitude": {"heading_deg": 200, "heading_swing_deg": 10, %TILT%},
        "passes": {"count": %PASSES%, "first_bank": "left"},
-       "profiler": {"blank_m": 0.25, "cell_m": 0.25, "cells": 20},
+       "profiler": {"blank_m": 0.25, "cell_m": 0.25, "cells": 20%PROFILER%},
        "noise": %NOISE%, "faults": %FAULTS%,
-       "measurement": {"instrument": {"beam_angle_deg": 20, "draft_m": 0.25,
+       "measurement": {"instrument": {"beam_angle_deg": 20, "draft_m": %DRAFT%%INSTRUMENT%,
                                       "declination_deg": -3, "heading_offset_deg": 1.5}}}
       """;
 
@@ -47,6 +47,10 @@ final class Rivers {
   private int passes = 2;
   private String noise = "{}";
   private String faults = "{}";
+  private String tilt = "\"pitch_deg\": 0, \"roll_deg\": 0";
+  private String profiler = "";
+  private String instrument = "";
+  private double draftM = 0.25;
 
   Rivers vertical(String json) {
     vertical = json;
@@ -84,6 +88,31 @@ final class Rivers {
     return this;
   }
 
+  /** Largest pitch and roll of the swaying boat (deg). */
+  Rivers tilt(double pitchDeg, double rollDeg) {
+    tilt = "\"pitch_deg\": " + pitchDeg + ", \"roll_deg\": " + rollDeg;
+    return this;
+  }
+
+  /** Axes of the recorded velocities; beams point 40, 130, 220 and 310 degrees from forward. */
+  Rivers frame(String name) {
+    profiler += ", \"quality_columns\": true, \"frame\": \"" + name + '"';
+    instrument += ", \"beam_azimuths_deg\": [40, 130, 220, 310]";
+    return this;
+  }
+
+  /** A record made with one speed of sound in water that has another (m/s). */
+  Rivers soundSpeed(double usedMps, double trueMps, double temperatureDegC) {
+    profiler += ", \"sound_speed_mps\": " + trueMps + ", \"temperature_degc\": " + temperatureDegC;
+    instrument += ", \"sound_speed_used_mps\": " + usedMps;
+    return this;
+  }
+
+  Rivers draft(double metres) {
+    draftM = metres;
+    return this;
+  }
+
   Recipe recipe() throws UnusableInput {
     return RecipeFile.parse(
         RECIPE
@@ -93,7 +122,11 @@ final class Rivers {
             .replace("%WOBBLE%", Double.toString(wobbleM))
             .replace("%PASSES%", Integer.toString(passes))
             .replace("%NOISE%", noise)
-            .replace("%FAULTS%", faults),
+            .replace("%FAULTS%", faults)
+            .replace("%TILT%", tilt)
+            .replace("%PROFILER%", profiler)
+            .replace("%INSTRUMENT%", instrument)
+            .replace("%DRAFT%", Double.toString(draftM)),
         "virtual.recipe.json");
   }
 }

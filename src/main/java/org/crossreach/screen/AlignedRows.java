@@ -1,0 +1,97 @@
+package org.crossreach.screen;
+
+/**
+ * The velocities of an ensemble and of its neighbours in time, cell beside cell: where an ensemble
+ * has other cells, those are taken that hold the centres of the middle ensemble's cells.
+ *
+ * <p>Velocities stand either as they are, over the ground where the boat's velocity is known, or
+ * relative to the middle of their own ensemble.
+ */
+final class AlignedRows {
+
+  private static final int REACH = RowWindow.REACH;
+  private static final int ROWS = 2 * REACH + 1;
+
+  private final CellFacts facts;
+  private final RowWindow window;
+  private final double[][] east = new double[ROWS][];
+  private final double[][] north = new double[ROWS][];
+  private final double[][] shiftedEast;
+  private final double[][] shiftedNorth;
+  private final double[] middleEast = new double[ROWS];
+  private final double[] middleNorth = new double[ROWS];
+  private final double[] offsetEast = new double[ROWS];
+  private final double[] offsetNorth = new double[ROWS];
+
+  AlignedRows(CellFacts facts, RowWindow window) {
+    this.facts = facts;
+    this.window = window;
+    shiftedEast = new double[ROWS][facts.cells()];
+    shiftedNorth = new double[ROWS][facts.cells()];
+  }
+
+  /** Lays an ensemble in the middle. */
+  void centreOn(int ensemble) {
+    window.centreOn(ensemble);
+    for (int d = -REACH; d <= REACH; d++) {
+      int other = ensemble + d;
+      int row = d + REACH;
+      boolean there = other >= 0 && other < facts.size();
+      east[row] = there ? window.east(other) : null;
+      north[row] = there ? window.north(other) : null;
+      if (there) {
+        middleEast[row] = window.middleEast(other);
+        middleNorth[row] = window.middleNorth(other);
+        if (!sameCells(ensemble, other)) {
+          shift(ensemble, other, row);
+        }
+      }
+    }
+  }
+
+  private boolean sameCells(int a, int b) {
+    return facts.firstCellM(a) == facts.firstCellM(b) && facts.cellSizeM(a) == facts.cellSizeM(b);
+  }
+
+  private void shift(int ensemble, int other, int row) {
+    double first = facts.firstCellM(ensemble);
+    double size = facts.cellSizeM(ensemble);
+    double otherTop = facts.firstCellM(other) - 0.5 * facts.cellSizeM(other);
+    double otherSize = facts.cellSizeM(other);
+    for (int k = 0; k < facts.cells(); k++) {
+      int cell = (int) Math.floor((first + k * size - otherTop) / otherSize);
+      boolean there = cell >= 0 && cell < facts.cells();
+      shiftedEast[row][k] = there ? east[row][cell] : Double.NaN;
+      shiftedNorth[row][k] = there ? north[row][cell] : Double.NaN;
+    }
+    east[row] = shiftedEast[row];
+    north[row] = shiftedNorth[row];
+  }
+
+  /** Chooses how velocities stand: relative to the middle of their ensemble, or as they are. */
+  void relative(boolean toMiddle) {
+    for (int row = 0; row < ROWS; row++) {
+      offsetEast[row] = toMiddle ? middleEast[row] : 0;
+      offsetNorth[row] = toMiddle ? middleNorth[row] : 0;
+    }
+  }
+
+  /**
+   * Whether a cell of an ensemble is there and used; d is 0 for the middle one, -1 for the one
+   * before.
+   */
+  boolean has(int d, int cell) {
+    double[] row = east[d + REACH];
+    return row != null && cell >= 0 && cell < row.length && !Double.isNaN(row[cell]);
+  }
+
+  /** Eastward velocity (m/s) of a cell that {@linkplain #has is there}. */
+  double east(int d, int cell) {
+    return east[d + REACH][cell] - offsetEast[d + REACH];
+  }
+
+  /** Northward velocity (m/s) of a cell that {@linkplain #has is there}. */
+  double north(int d, int cell) {
+    return north[d + REACH][cell] - offsetNorth[d + REACH];
+  }
+}
