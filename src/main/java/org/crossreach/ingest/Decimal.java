@@ -23,11 +23,23 @@ final class Decimal {
   /** Most digits that can be collected in a long without overflow. */
   private static final int SAFE_DIGITS = 18;
 
-  /** The powers of ten that are exact as doubles. */
-  private static final double[] TEN_TO = {
-    1e0, 1e1, 1e2, 1e3, 1e4, 1e5, 1e6, 1e7, 1e8, 1e9, 1e10, 1e11, 1e12, 1e13, 1e14, 1e15, 1e16,
-    1e17, 1e18, 1e19, 1e20, 1e21, 1e22
-  };
+  /** Number of powers of ten that are exact as doubles: 10⁰ to 10²². */
+  private static final int EXACT_POWERS = 23;
+
+  /**
+   * The powers of ten that are exact as doubles, once with plus and once with minus: to divide by a
+   * negative power costs less than a branch on a sign that nobody can foresee.
+   */
+  private static final double[] SIGNED_POWERS = new double[2 * EXACT_POWERS];
+
+  static {
+    double power = 1;
+    for (int i = 0; i < EXACT_POWERS; i++) {
+      SIGNED_POWERS[i] = power;
+      SIGNED_POWERS[EXACT_POWERS + i] = -power;
+      power *= 10;
+    }
+  }
 
   private Decimal() {}
 
@@ -41,32 +53,27 @@ final class Decimal {
    *     decimal number
    */
   static double parse(char[] text, int from, int to) {
-    int at = from;
-    boolean negative = false;
-    if (at < to && (text[at] == '-' || text[at] == '+')) {
-      negative = text[at] == '-';
-      at++;
-    }
+    int minus = from < to && text[from] == '-' ? 1 : 0;
+    int at = from + minus;
     int digits = to - at;
+    int decimals = 0;
     long whole = 0;
     int digit;
     while (at < to && (digit = text[at] - '0') >= 0 && digit <= 9) {
       whole = 10 * whole + digit;
       at++;
     }
-    int decimals = 0;
     if (at < to && text[at] == '.') {
       digits--;
-      int point = at++;
+      at++;
+      decimals = to - at;
       while (at < to && (digit = text[at] - '0') >= 0 && digit <= 9) {
         whole = 10 * whole + digit;
         at++;
       }
-      decimals = at - point - 1;
     }
     if (at == to && digits > 0 && digits <= SAFE_DIGITS && whole <= EXACT) {
-      double value = whole / TEN_TO[decimals];
-      return negative ? -value : value;
+      return whole / SIGNED_POWERS[minus * EXACT_POWERS + decimals];
     }
     return isDecimal(text, from, to)
         ? JavaDoubleParser.parseDouble(text, from, to - from)

@@ -4,12 +4,9 @@ import de.siegmar.fastcsv.reader.CsvParseException;
 import de.siegmar.fastcsv.reader.CsvReader;
 import java.io.IOException;
 import java.io.InputStream;
-import java.io.OutputStream;
 import java.io.UncheckedIOException;
-import java.nio.file.FileSystemException;
 import java.nio.file.Files;
 import java.nio.file.Path;
-import java.security.DigestInputStream;
 import org.crossreach.survey.InputFile;
 import org.crossreach.survey.UnusableInput;
 
@@ -48,20 +45,30 @@ public final class EnsembleCsv {
     FileProblems problems = new FileProblems(shownName);
     StoredFile.check(file, problems);
     try (InputStream stored = Files.newInputStream(file)) {
-      DigestInputStream digested = new DigestInputStream(stored, StoredFile.sha256());
-      EnsembleTable table = read(digested, file.toString().endsWith(".gz"), problems);
-      problems.throwIfAny();
-      digested.transferTo(OutputStream.nullOutputStream());
-      return new EnsembleFile(
-          table.build(),
-          new InputFile(shownName, StoredFile.hex(digested.getMessageDigest().digest())),
-          table.header().notes());
-    } catch (FileSystemException e) {
+      return read(stored, file.toString().endsWith(".gz"), problems);
+    } catch (IOException e) {
       throw StoredFile.named(shownName, e);
     }
   }
 
-  private static EnsembleTable read(InputStream stored, boolean packed, FileProblems problems)
+  /**
+   * Reads the bytes of a file.
+   *
+   * @param bytes the bytes as stored
+   * @param packed whether they are packed by gzip
+   * @param problems receives what is wrong; names the file
+   */
+  static EnsembleFile read(InputStream bytes, boolean packed, FileProblems problems)
+      throws UnusableInput, IOException {
+    try (DigestedStream stored = new DigestedStream(bytes)) {
+      EnsembleTable table = readTable(stored, packed, problems);
+      problems.throwIfAny();
+      return new EnsembleFile(
+          table.build(), new InputFile(problems.file(), stored.sha256()), table.header().notes());
+    }
+  }
+
+  private static EnsembleTable readTable(InputStream stored, boolean packed, FileProblems problems)
       throws UnusableInput, IOException {
     StrictUtf8Reader text;
     try {

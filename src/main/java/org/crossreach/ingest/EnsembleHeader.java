@@ -5,9 +5,7 @@ import java.util.EnumMap;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
-import java.util.Optional;
 import org.crossreach.survey.CellQuantity;
-import org.crossreach.survey.EnsembleQuantity;
 import org.crossreach.survey.Frame;
 import org.crossreach.survey.Note;
 
@@ -67,9 +65,17 @@ final class EnsembleHeader {
     return columns.get(place);
   }
 
-  /** The name at a place from 0, as it stands in the file. */
-  String name(int place) {
-    return names.get(place).strip();
+  /** Whether the fields at a place from 0 are numbers of the ensemble or of a cell. */
+  boolean isNumber(int place) {
+    EnsembleColumn column = columns.get(place);
+    return column != null
+        && (column.role() == EnsembleColumn.Role.ENSEMBLE
+            || column.role() == EnsembleColumn.Role.CELL);
+  }
+
+  /** The place from 0 of the column with a name, -1 when there is none. */
+  int fieldOf(String name) {
+    return places.getOrDefault(name, 0) - 1;
   }
 
   /** Whether the row holds any known name at all. */
@@ -87,7 +93,7 @@ final class EnsembleHeader {
     return maxCells;
   }
 
-  /** Whether there is a column of a quantity. */
+  /** Whether there is a column of a quantity, whatever its cell. */
   boolean has(CellQuantity quantity) {
     return cellsOf.containsKey(quantity);
   }
@@ -283,16 +289,5 @@ final class EnsembleHeader {
         return;
       }
     }
-  }
-
-  /** Whether a quantity has a column; for ensemble quantities. */
-  boolean has(EnsembleQuantity quantity) {
-    return find(quantity).isPresent();
-  }
-
-  private Optional<EnsembleColumn> find(EnsembleQuantity quantity) {
-    return columns.stream()
-        .filter(column -> column != null && column.ensembleQuantity() == quantity)
-        .findFirst();
   }
 }

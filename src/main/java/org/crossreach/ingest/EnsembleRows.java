@@ -1,8 +1,10 @@
 package org.crossreach.ingest;
 
 import java.time.OffsetDateTime;
+import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.EnumMap;
+import java.util.List;
 import java.util.Map;
 import org.crossreach.survey.CellGrid;
 import org.crossreach.survey.CellQuantity;
@@ -12,18 +14,25 @@ import org.crossreach.survey.Ensembles;
 /**
  * Collects the ensembles of one file as primitive columns.
  *
- * <p>A row's numbers are handed over in one array: first the quantities of the ensemble, then all
- * cells of each quantity of cells, in the order of the enumerations, of those that the header has.
+ * <p>A row's numbers are handed over by field, in the order of the file.
  */
 final class EnsembleRows {
 
   private static final int FIRST_ROWS = 1024;
 
   private final EnsembleHeader header;
-  private final EnsembleQuantity[] quantities;
-  private final CellQuantity[] cellQuantities;
+  private final List<EnsembleQuantity> quantities = new ArrayList<>();
+  private final List<CellQuantity> cellQuantities = new ArrayList<>();
+
+  /** For each quantity of the ensemble its field. */
+  private final int[] quantityFields;
+
+  /** For each quantity of cells the fields of its cells. */
+  private final int[][] cellFields;
+
   private final double[][] columns;
   private final CellGrid.Builder[] grids;
+  private final double[] gathered;
   private long[] number = new long[FIRST_ROWS];
   private double[] elapsedS = new double[FIRST_ROWS];
   private int[] cells = new int[FIRST_ROWS];
@@ -31,38 +40,37 @@ final class EnsembleRows {
 
   EnsembleRows(EnsembleHeader header) {
     this.header = header;
-    quantities =
-        Arrays.stream(EnsembleQuantity.values())
-            .filter(header::has)
-            .toArray(EnsembleQuantity[]::new);
-    cellQuantities =
-        Arrays.stream(CellQuantity.values()).filter(header::has).toArray(CellQuantity[]::new);
-    columns = new double[quantities.length][FIRST_ROWS];
-    grids = new CellGrid.Builder[cellQuantities.length];
+    int maxCells = header.maxCells();
+    int[] fields = new int[EnsembleQuantity.values().length];
+    int[][] fieldsByCell = new int[CellQuantity.values().length][];
+    for (int field = 0; field < header.width(); field++) {
+      EnsembleColumn column = header.column(field);
+      if (column != null && column.role() == EnsembleColumn.Role.ENSEMBLE) {
+        fields[quantities.size()] = field;
+        quantities.add(column.ensembleQuantity());
+      } else if (column != null && column.role() == EnsembleColumn.Role.CELL) {
+        int index = cellQuantities.indexOf(column.cellQuantity());
+        if (index < 0) {
+          index = cellQuantities.size();
+          cellQuantities.add(column.cellQuantity());
+          fieldsByCell[index] = new int[maxCells];
+        }
+        fieldsByCell[index][column.cell() - 1] = field;
+      }
+    }
+    quantityFields = Arrays.copyOf(fields, quantities.size());
+    cellFields = Arrays.copyOf(fieldsByCell, cellQuantities.size());
+    columns = new double[quantities.size()][FIRST_ROWS];
+    gathered = new double[maxCells];
+    grids = new CellGrid.Builder[cellQuantities.size()];
     for (int i = 0; i < grids.length; i++) {
-      grids[i] = new CellGrid.Builder(header.maxCells());
+      grids[i] = new CellGrid.Builder(maxCells);
     }
   }
 
-  /** Number of numbers in a row. */
+  /** Number of numbers that are kept of a row. */
   int width() {
-    return quantities.length + cellQuantities.length * header.maxCells();
-  }
-
-  /** Index of a column's value in a row; the column is of an ensemble's or a cell's quantity. */
-  int slot(EnsembleColumn column) {
-    if (column.role() == EnsembleColumn.Role.ENSEMBLE) {
-      return slot(column.ensembleQuantity());
-    }
-    return quantities.length
-        + Arrays.asList(cellQuantities).indexOf(column.cellQuantity()) * header.maxCells()
-        + column.cell()
-        - 1;
-  }
-
-  /** Index of a quantity's value in a row, -1 when there is none. */
-  int slot(EnsembleQuantity quantity) {
-    return Arrays.asList(quantities).indexOf(quantity);
+    return columns.length + grids.length * header.maxCells();
   }
 
   /** Number of rows so far. */
@@ -75,8 +83,8 @@ final class EnsembleRows {
    *
    * @param ensemble its number
    * @param secondsAfterFirst its time after the first ensemble (s)
-   * @param cellCount its number of cells; what the row holds beyond them is cleared
-   * @param row its numbers
+   * @param cellCount its number of cells; what the row holds beyond them is dropped
+   * @param row its numbers by field
    */
   void add(long ensemble, double secondsAfterFirst, int cellCount, double[] row) {
     if (rows == number.length) {
@@ -86,13 +94,15 @@ final class EnsembleRows {
     elapsedS[rows] = secondsAfterFirst;
     cells[rows] = cellCount;
     for (int i = 0; i < columns.length; i++) {
-      columns[i][rows] = row[i];
+      columns[i][rows] = row[quantityFields[i]];
     }
-    int maxCells = header.maxCells();
     for (int i = 0; i < grids.length; i++) {
-      int from = columns.length + i * maxCells;
-      Arrays.fill(row, from + cellCount, from + maxCells, Double.NaN);
-      grids[i].addRow(row, from);
+      int[] fields = cellFields[i];
+      for (int cell = 0; cell < cellCount; cell++) {
+        gathered[cell] = row[fields[cell]];
+      }
+      Arrays.fill(gathered, cellCount, gathered.length, Double.NaN);
+      grids[i].addRow(gathered);
     }
     rows++;
   }
@@ -115,12 +125,12 @@ final class EnsembleRows {
   Ensembles build(OffsetDateTime start) {
     Map<EnsembleQuantity, double[]> ensembleColumns = new EnumMap<>(EnsembleQuantity.class);
     for (int i = 0; i < columns.length; i++) {
-      ensembleColumns.put(quantities[i], Arrays.copyOf(columns[i], rows));
+      ensembleColumns.put(quantities.get(i), Arrays.copyOf(columns[i], rows));
       columns[i] = null;
     }
     Map<CellQuantity, CellGrid> cellGrids = new EnumMap<>(CellQuantity.class);
     for (int i = 0; i < grids.length; i++) {
-      cellGrids.put(cellQuantities[i], grids[i].build());
+      cellGrids.put(cellQuantities.get(i), grids[i].build());
     }
     return new Ensembles(
         header.frame(),

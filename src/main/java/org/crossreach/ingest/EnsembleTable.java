@@ -3,9 +3,7 @@ package org.crossreach.ingest;
 import de.siegmar.fastcsv.reader.AbstractBaseCsvCallbackHandler;
 import java.time.OffsetDateTime;
 import java.util.ArrayList;
-import java.util.Arrays;
 import java.util.List;
-import org.crossreach.survey.EnsembleQuantity;
 import org.crossreach.survey.Ensembles;
 
 /**
@@ -34,25 +32,22 @@ final class EnsembleTable extends AbstractBaseCsvCallbackHandler<Object> {
   private EnsembleHeader header;
   private EnsembleRows rows;
   private OffsetDateTime start;
-  private int width;
   private boolean endsQuoted;
   private boolean blank;
   private boolean anyRow;
   private long problemsBefore;
 
-  /** For each field: index in {@link #row}, or one of the negative values below. */
-  private int[] slots;
+  /** The numbers of the row that is being read, by field; empty until the header is known. */
+  private double[] row = new double[0];
 
-  private static final int IGNORED = -1;
-  private static final int NUMBER = -2;
-  private static final int TIME = -3;
-  private static final int CELLS = -4;
+  /**
+   * For each field the lowest and the highest number that need no second look; none for fields that
+   * are no numbers of the ensemble or of a cell.
+   */
+  private double[] limits;
 
-  private double[] lowest;
-  private double[] highest;
-  private double[] row;
-  private int firstCellSlot;
-  private int cellSizeSlot;
+  private int firstCellField;
+  private int cellSizeField;
   private double number;
   private double cells;
   private boolean timeRead;
@@ -112,28 +107,23 @@ final class EnsembleTable extends AbstractBaseCsvCallbackHandler<Object> {
   @Override
   protected void handleField(int field, char[] buffer, int offset, int length, boolean quoted) {
     endsQuoted = quoted;
-    if (field >= width) {
+    double[] numbers = row;
+    if (field >= numbers.length) {
       handleBeyond(field, buffer, offset, length);
-      return;
-    }
-    int slot = slots[field];
-    if (slot >= 0) {
-      if (length == 0) {
-        row[slot] = Double.NaN;
-        return;
-      }
+    } else if (length == 0) {
+      numbers[field] = Double.NaN;
+    } else {
       double value = Decimal.parse(buffer, offset, offset + length);
-      row[slot] =
-          value >= lowest[field] && value <= highest[field]
+      numbers[field] =
+          value >= limits[2 * field] && value <= limits[2 * field + 1]
               ? value
               : unusual(field, buffer, offset, offset + length);
-    } else if (slot != IGNORED) {
-      handleKey(slot, field, buffer, offset, offset + length);
     }
   }
 
   private void handleBeyond(int field, char[] buffer, int offset, int length) {
     if (field >= MOST_COLUMNS) {
+      problems.takeBack(problemsBefore);
       problems.add(
           line(),
           "",
@@ -147,8 +137,12 @@ final class EnsembleTable extends AbstractBaseCsvCallbackHandler<Object> {
     }
   }
 
-  /** A field that is not plainly a number in range: missing, with spaces around it, or wrong. */
+  /** A field that is not plainly a number in range: another column, missing, spaced, or wrong. */
   private double unusual(int field, char[] buffer, int start, int end) {
+    EnsembleColumn column = header.column(field);
+    if (column == null) {
+      return Double.NaN;
+    }
     int from = start;
     int to = end;
     while (from < to && isSpace(buffer[from])) {
@@ -157,19 +151,51 @@ final class EnsembleTable extends AbstractBaseCsvCallbackHandler<Object> {
     while (from < to && isSpace(buffer[to - 1])) {
       to--;
     }
+    return switch (column.role()) {
+      case TIME -> readTime(buffer, from, to);
+      case NUMBER -> number = readWhole(column, buffer, from, to);
+      case CELLS -> cells = readWhole(column, buffer, from, to);
+      case ENSEMBLE, CELL -> readNumber(column, buffer, from, to);
+    };
+  }
+
+  private double readNumber(EnsembleColumn column, char[] buffer, int from, int to) {
     if (isMissing(buffer, from, to)) {
       return Double.NaN;
     }
     double value = Decimal.parse(buffer, from, to);
-    if (value >= lowest[field] && value <= highest[field]) {
+    if (column.range().holds(value)) {
       return value;
     }
-    PhysicalRange range = header.column(field).range();
-    String found = Quoted.of(buffer, start, end);
-    if (Double.isNaN(value)) {
-      problems.add(line(), header.name(field), found, "a number", remedyFor(buffer, from, to));
-    } else {
-      problems.add(line(), header.name(field), found, range.phrase(), MISSING_REMEDY);
+    problems.add(
+        line(),
+        column.name(),
+        Quoted.of(buffer, from, to),
+        Double.isNaN(value) ? "a number" : column.range().phrase(),
+        Double.isNaN(value) ? remedyFor(buffer, from, to) : MISSING_REMEDY);
+    return Double.NaN;
+  }
+
+  private double readWhole(EnsembleColumn column, char[] buffer, int from, int to) {
+    double value = readNumber(column, buffer, from, to);
+    if (value == Math.rint(value)) {
+      return value;
+    }
+    if (!Double.isNaN(value)) {
+      problems.add(line(), column.name(), Quoted.of(buffer, from, to), "a whole number", "");
+    }
+    return Double.NaN;
+  }
+
+  private double readTime(char[] buffer, int from, int to) {
+    timeRead = time.parse(buffer, from, to);
+    if (!timeRead && !isMissing(buffer, from, to)) {
+      problems.add(
+          line(),
+          EnsembleColumn.TIME,
+          Quoted.of(buffer, from, to),
+          "a date and time with offset, for example 2031-04-18T09:30:00.25+01:00",
+          "");
     }
     return Double.NaN;
   }
@@ -178,6 +204,9 @@ final class EnsembleTable extends AbstractBaseCsvCallbackHandler<Object> {
     for (int i = from; i < to; i++) {
       if (buffer[i] == ',') {
         return "use a decimal point";
+      }
+      if (buffer[i] == 0) {
+        return "the file is damaged: copy it again";
       }
     }
     return MISSING_REMEDY;
@@ -198,62 +227,23 @@ final class EnsembleTable extends AbstractBaseCsvCallbackHandler<Object> {
             && buffer[to - 1] == (length == 2 ? 'A' : 'N'));
   }
 
-  private void handleKey(int key, int field, char[] buffer, int start, int end) {
-    if (key == TIME) {
-      handleTime(field, buffer, start, end);
-      return;
-    }
-    double value = unusual(field, buffer, start, end);
-    if (Double.isNaN(value)) {
-      if (isMissing(buffer, start, end)) {
-        problems.add(line(), header.name(field), Quoted.of(buffer, start, end), "a number", "");
-      }
-    } else if (value != Math.rint(value)) {
-      problems.add(line(), header.name(field), Quoted.of(buffer, start, end), "a whole number", "");
-      value = Double.NaN;
-    }
-    if (key == NUMBER) {
-      number = value;
-    } else {
-      cells = value;
-    }
-  }
-
-  private void handleTime(int field, char[] buffer, int start, int end) {
-    int from = start;
-    int to = end;
-    while (from < to && isSpace(buffer[from])) {
-      from++;
-    }
-    while (from < to && isSpace(buffer[to - 1])) {
-      to--;
-    }
-    timeRead = time.parse(buffer, from, to);
-    if (!timeRead) {
-      problems.add(
-          line(),
-          header.name(field),
-          Quoted.of(buffer, start, end),
-          "a date and time with offset, for example 2031-04-18T09:30:00.25+01:00",
-          "");
-    }
-  }
-
   @Override
   protected Object buildRecord() {
     if (blank) {
       return null;
     }
-    if (endsQuoted && text.ended() && text.last() != '"') {
+    boolean openQuote = endsQuoted && text.ended() && text.last() != '"';
+    if (openQuote) {
+      problems.takeBack(problemsBefore); // the mark swallowed what follows it
       problems.add(line(), "", "a quotation mark without its partner", "a closing one", "");
     }
     if (header == null) {
       takeHeader();
     } else {
       anyRow = true;
-      if (getFieldCount() == width) {
+      if (!openQuote && getFieldCount() == row.length) {
         takeRow();
-      } else {
+      } else if (!openQuote) {
         problems.takeBack(problemsBefore); // the fields were taken for those of other columns
         reportWidth(getFieldCount());
       }
@@ -263,40 +253,24 @@ final class EnsembleTable extends AbstractBaseCsvCallbackHandler<Object> {
 
   private void takeHeader() {
     header = new EnsembleHeader(names, line(), problems);
-    width = header.width();
     if (!header.isUsable()) {
       throw new Stopped();
     }
     rows = new EnsembleRows(header);
-    row = new double[rows.width()];
-    Arrays.fill(row, Double.NaN);
-    slots = new int[width];
-    lowest = new double[width];
-    highest = new double[width];
-    for (int i = 0; i < width; i++) {
-      EnsembleColumn column = header.column(i);
-      slots[i] = column == null ? IGNORED : slot(column);
-      if (column != null) {
-        lowest[i] = column.range().lowest();
-        highest[i] = column.range().highest();
-      }
+    row = new double[header.width()];
+    limits = new double[2 * header.width()];
+    for (int i = 0; i < row.length; i++) {
+      boolean plain = header.isNumber(i);
+      limits[2 * i] = plain ? header.column(i).range().lowest() : Double.NaN;
+      limits[2 * i + 1] = plain ? header.column(i).range().highest() : Double.NaN;
     }
-    firstCellSlot = rows.slot(EnsembleQuantity.FIRST_CELL_M);
-    cellSizeSlot = rows.slot(EnsembleQuantity.CELL_SIZE_M);
-  }
-
-  private int slot(EnsembleColumn column) {
-    return switch (column.role()) {
-      case NUMBER -> NUMBER;
-      case TIME -> TIME;
-      case CELLS -> CELLS;
-      case ENSEMBLE, CELL -> rows.slot(column);
-    };
+    firstCellField = header.fieldOf(EnsembleColumn.FIRST_CELL);
+    cellSizeField = header.fieldOf(EnsembleColumn.CELL_SIZE);
   }
 
   private void reportWidth(int found) {
     String remedy;
-    if (found > width) {
+    if (found > row.length) {
       remedy = "if commas stand for decimal points, write points";
     } else if (text.ended()) {
       remedy = "the file ends within this row: copy it again, or delete the row";
@@ -307,18 +281,21 @@ final class EnsembleTable extends AbstractBaseCsvCallbackHandler<Object> {
         line(),
         "",
         found + (found == 1 ? " field" : " fields"),
-        width + " as in the header",
+        row.length + " as in the header",
         remedy);
   }
 
   private void takeRow() {
+    requireKey(EnsembleColumn.NUMBER, !Double.isNaN(number));
+    requireKey(EnsembleColumn.TIME, timeRead);
+    requireKey(EnsembleColumn.CELLS, !Double.isNaN(cells));
     checkNumber();
     checkTime();
     checkCells();
     if (!problems.isEmpty()) {
       return;
     }
-    if ((long) (rows.size() + 1) * row.length > MOST_NUMBERS) {
+    if ((long) (rows.size() + 1) * rows.width() > MOST_NUMBERS) {
       problems.add(
           line(),
           "",
@@ -329,6 +306,13 @@ final class EnsembleTable extends AbstractBaseCsvCallbackHandler<Object> {
     }
     long nanos = (time.epochSecond() - firstSecond) * 1_000_000_000L + time.nano() - firstNano;
     rows.add((long) number, nanos / 1e9, (int) cells, row);
+  }
+
+  /** A key that was not read, although nothing was wrong with its text, is missing. */
+  private void requireKey(String name, boolean read) {
+    if (!read && problems.count() == problemsBefore && header.fieldOf(name) >= 0) {
+      problems.add(line(), name, "nothing", "a value in every row", "complete the row");
+    }
   }
 
   private void checkNumber() {
@@ -382,13 +366,13 @@ final class EnsembleTable extends AbstractBaseCsvCallbackHandler<Object> {
           "at most " + header.maxCells() + ", the number of cells that have columns",
           "add the missing columns, or correct the number");
     } else if (cells > 0) {
-      requireForCells(firstCellSlot, EnsembleColumn.FIRST_CELL);
-      requireForCells(cellSizeSlot, EnsembleColumn.CELL_SIZE);
+      requireForCells(firstCellField, EnsembleColumn.FIRST_CELL);
+      requireForCells(cellSizeField, EnsembleColumn.CELL_SIZE);
     }
   }
 
-  private void requireForCells(int slot, String name) {
-    if (slot >= 0 && Double.isNaN(row[slot]) && problems.isEmpty()) {
+  private void requireForCells(int field, String name) {
+    if (field >= 0 && Double.isNaN(row[field]) && problems.count() == problemsBefore) {
       problems.add(line(), name, "nothing", "a number wherever there are cells", "");
     }
   }

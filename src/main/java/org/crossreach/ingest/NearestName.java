@@ -10,6 +10,8 @@ final class NearestName {
   /** Longest text that is compared; longer ones are no slip of a name. */
   private static final int LONGEST = 80;
 
+  private static final int SHORTEST_START = 4;
+
   private NearestName() {}
 
   /**
@@ -17,7 +19,9 @@ final class NearestName {
    *
    * <p>A change is an inserted, deleted or replaced character or two exchanged neighbours; letter
    * case does not count. Near enough is one change in every three characters of the text. Of
-   * equally near names the first is taken.
+   * equally near names the first is taken. Where none is near enough, a text of at least {@value
+   * #SHORTEST_START} characters stands for the first name that starts with it, as when the unit was
+   * forgotten.
    */
   static Optional<String> find(String text, Collection<String> valid) {
     if (text.isBlank() || text.length() > LONGEST) {
@@ -30,6 +34,11 @@ final class NearestName {
       int changes = changes(wanted, name.toLowerCase(Locale.ROOT));
       if (changes < fewest) {
         fewest = changes;
+        nearest = name;
+      }
+    }
+    for (String name : valid) {
+      if (nearest == null && wanted.length() >= SHORTEST_START && name.startsWith(wanted)) {
         nearest = name;
       }
     }

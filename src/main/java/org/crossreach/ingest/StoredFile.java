@@ -57,17 +57,19 @@ final class StoredFile {
         throw new UnusableInput(problems.list());
       }
       return bytes;
-    } catch (FileSystemException e) {
+    } catch (IOException e) {
       throw named(problems.file(), e);
     }
   }
 
-  /** A file system's failure with the name by which the user knows the file, in plain words. */
-  static IOException named(String shownName, FileSystemException failure) {
-    String reason =
-        failure instanceof AccessDeniedException
-            ? "permission denied"
-            : failure.getReason() == null ? "cannot be read" : failure.getReason();
+  /** A failure of the disk with the name by which the user knows the file, in plain words. */
+  static IOException named(String shownName, IOException failure) {
+    String reason = failure.getMessage();
+    if (failure instanceof AccessDeniedException) {
+      reason = "permission denied";
+    } else if (failure instanceof FileSystemException system) {
+      reason = system.getReason() == null ? "cannot be read" : system.getReason();
+    }
     return new IOException(shownName + ": " + reason, failure);
   }
 

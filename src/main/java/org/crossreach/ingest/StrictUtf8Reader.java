@@ -3,9 +3,15 @@ package org.crossreach.ingest;
 import java.io.IOException;
 import java.io.InputStream;
 import java.io.Reader;
+import java.nio.ByteBuffer;
+import java.nio.CharBuffer;
+import java.nio.charset.CharsetDecoder;
+import java.nio.charset.CoderResult;
+import java.nio.charset.CodingErrorAction;
+import java.nio.charset.StandardCharsets;
 
 /**
- * Characters of a UTF-8 text that holds neither malformed bytes nor NUL.
+ * Characters of a text in UTF-8 without malformed bytes.
  *
  * <p>A byte-order mark at the start is skipped. At a byte that does not belong into such a text,
  * all characters before it are handed out first and the next call fails with {@link
@@ -18,11 +24,15 @@ final class StrictUtf8Reader extends Reader {
 
   private final InputStream bytes;
   private final byte[] block = new byte[BLOCK];
-  private int at;
-  private int end;
+  private final ByteBuffer waiting = ByteBuffer.wrap(block).limit(0);
+  private final CharsetDecoder decoder =
+      StandardCharsets.UTF_8
+          .newDecoder()
+          .onMalformedInput(CodingErrorAction.REPORT)
+          .onUnmappableCharacter(CodingErrorAction.REPORT);
   private boolean started;
+  private boolean lastBlock;
   private boolean ended;
-  private char pending;
   private char last;
   private int largestTarget;
 
@@ -45,116 +55,59 @@ final class StrictUtf8Reader extends Reader {
     return largestTarget;
   }
 
+  /**
+   * Reads characters, at least two unless the text ends.
+   *
+   * @param length room for at least two characters, the halves of a surrogate pair
+   */
   @Override
   public int read(char[] target, int offset, int length) throws IOException {
+    if (length < 2) {
+      throw new IllegalArgumentException("length must be at least 2, not " + length);
+    }
+    largestTarget = Math.max(largestTarget, target.length);
     if (!started) {
       started = true;
       fill(4);
       recognise();
     }
-    largestTarget = Math.max(largestTarget, target.length);
-    int from = offset;
-    int to = offset + length;
-    if (pending != 0 && from < to) {
-      target[from++] = pending;
-      pending = 0;
-    }
-    while (from < to) {
-      from = copyPlain(target, from, to);
-      if (from < to && at < end) {
-        int character = decode();
-        if (character < 0) {
-          break;
-        }
-        from = put(character, target, from, to);
-      } else if (from > offset || !fill(1)) {
-        break;
+    CharBuffer characters = CharBuffer.wrap(target, offset, length);
+    while (true) {
+      CoderResult result = decoder.decode(waiting, characters, lastBlock);
+      int count = characters.position() - offset;
+      if (count > 0) {
+        last = target[offset + count - 1];
+        return count;
       }
-    }
-    int count = from - offset;
-    if (count == 0 && length > 0) {
-      if (at < end) {
+      if (result.isError()) {
         throw unreadable();
       }
-      ended = true;
-      return -1;
-    }
-    last = count > 0 ? target[offset + count - 1] : last;
-    return count;
-  }
-
-  /** Copies characters of the ASCII range, NUL excepted; gives the index after the last one. */
-  private int copyPlain(char[] target, int from, int to) {
-    int stop = Math.min(end, at + to - from);
-    int source = at;
-    int put = from;
-    while (source < stop && block[source] > 0) {
-      target[put++] = (char) block[source++];
-    }
-    at = source;
-    return put;
-  }
-
-  private int put(int character, char[] target, int from, int to) {
-    if (Character.isBmpCodePoint(character)) {
-      target[from] = (char) character;
-      return from + 1;
-    }
-    target[from] = Character.highSurrogate(character);
-    if (from + 1 == to) {
-      pending = Character.lowSurrogate(character);
-      return to;
-    }
-    target[from + 1] = Character.lowSurrogate(character);
-    return from + 2;
-  }
-
-  /** Takes one character of several bytes; negative, and nothing taken, when they are malformed. */
-  private int decode() throws IOException {
-    int lead = block[at] & 0xff;
-    int size = lead < 0xc2 ? 0 : lead < 0xe0 ? 2 : lead < 0xf0 ? 3 : lead < 0xf5 ? 4 : 0;
-    if (size == 0 || !fill(size)) {
-      return -1;
-    }
-    int character = lead & (0x7f >> size);
-    for (int i = 1; i < size; i++) {
-      int next = block[at + i];
-      if ((next & 0xc0) != 0x80) {
+      if (lastBlock) {
+        ended = true;
         return -1;
       }
-      character = character << 6 | next & 0x3f;
+      fill(waiting.remaining() + 1);
     }
-    boolean shortest = size == 2 || character >= (size == 3 ? 0x800 : 0x10000);
-    boolean paired = character >= Character.MIN_SURROGATE && character <= Character.MAX_SURROGATE;
-    if (!shortest || paired || character > Character.MAX_CODE_POINT) {
-      return -1;
-    }
-    at += size;
-    return character;
   }
 
-  /** Sees to it that a number of bytes stands ready; false when the file ends before. */
-  private boolean fill(int needed) throws IOException {
-    if (end - at >= needed) {
-      return true;
-    }
-    System.arraycopy(block, at, block, 0, end - at);
-    end -= at;
-    at = 0;
-    while (end < needed) {
-      int count = bytes.read(block, end, BLOCK - end);
+  /** Sees to it that a number of bytes is waiting, or all that are left. */
+  private void fill(int needed) throws IOException {
+    waiting.compact();
+    while (waiting.position() < needed && !lastBlock) {
+      int count = bytes.read(block, waiting.position(), waiting.remaining());
       if (count < 0) {
-        return false;
+        lastBlock = true;
+      } else {
+        waiting.position(waiting.position() + count);
       }
-      end += count;
     }
-    return true;
+    waiting.flip();
   }
 
   /** Skips a byte-order mark; refuses what is plainly something else. */
   private void recognise() throws UnreadableText {
     if (startsWith(0xef, 0xbb, 0xbf)) {
-      at = 3;
+      waiting.position(3);
     } else if (startsWith(0xff, 0xfe) || startsWith(0xfe, 0xff) || startsWithHalfEmptyPairs()) {
       throw new UnreadableText("UTF-16 text", EXPECTED, "save the file as UTF-8");
     } else if (startsWith(0x1f, 0x8b)) {
@@ -167,7 +120,7 @@ final class StrictUtf8Reader extends Reader {
   }
 
   private boolean startsWithHalfEmptyPairs() {
-    return end - at >= 4
+    return waiting.remaining() >= 4
         && (block[0] == 0) == (block[2] == 0)
         && (block[1] == 0) == (block[3] == 0)
         && (block[0] == 0) != (block[1] == 0);
@@ -175,7 +128,7 @@ final class StrictUtf8Reader extends Reader {
 
   private boolean startsWith(int... start) {
     for (int i = 0; i < start.length; i++) {
-      if (i >= end || (block[i] & 0xff) != start[i]) {
+      if (i >= waiting.limit() || (block[i] & 0xff) != start[i]) {
         return false;
       }
     }
@@ -183,14 +136,11 @@ final class StrictUtf8Reader extends Reader {
   }
 
   private UnreadableText unreadable() {
-    if (block[at] == 0) {
-      return new UnreadableText(
-          "a NUL byte", EXPECTED, "the file is damaged or no text: copy or export it again");
-    }
+    String value = Integer.toHexString(waiting.get(waiting.position()) & 0xff);
     return new UnreadableText(
-        "the byte 0x" + Integer.toHexString(block[at] & 0xff) + " where no such byte can be",
+        "the byte 0x" + value + " where no such byte can be",
         EXPECTED,
-        "save the file as UTF-8 (it may be ISO 8859-1 or Windows-1252)");
+        "save the file as UTF-8 (it may be ISO 8859-1 or Windows-1252), or copy it again");
   }
 
   @Override
