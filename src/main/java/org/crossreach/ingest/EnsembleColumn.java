@@ -221,7 +221,7 @@ record EnsembleColumn(
   PhysicalRange range() {
     return switch (role) {
       case NUMBER, TIME -> PhysicalRange.NUMBER;
-      case CELLS -> new PhysicalRange(0, MOST_CELLS, "");
+      case CELLS -> PhysicalRange.CELLS;
       case ENSEMBLE -> PhysicalRange.of(ensembleQuantity);
       case CELL ->
           switch (cellQuantity) {

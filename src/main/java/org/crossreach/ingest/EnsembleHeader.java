@@ -65,14 +65,6 @@ final class EnsembleHeader {
     return columns.get(place);
   }
 
-  /** Whether the fields at a place from 0 are numbers of the ensemble or of a cell. */
-  boolean isNumber(int place) {
-    EnsembleColumn column = columns.get(place);
-    return column != null
-        && (column.role() == EnsembleColumn.Role.ENSEMBLE
-            || column.role() == EnsembleColumn.Role.CELL);
-  }
-
   /** The place from 0 of the column with a name, -1 when there is none. */
   int fieldOf(String name) {
     return places.getOrDefault(name, 0) - 1;

@@ -30,6 +30,9 @@ final class EnsembleRows {
   /** For each quantity of cells the fields of its cells. */
   private final int[][] cellFields;
 
+  /** For each quantity of cells whether its fields lie side by side in the order of the cells. */
+  private final boolean[] inOrder;
+
   private final double[][] columns;
   private final CellGrid.Builder[] grids;
   private final double[] gathered;
@@ -60,12 +63,25 @@ final class EnsembleRows {
     }
     quantityFields = Arrays.copyOf(fields, quantities.size());
     cellFields = Arrays.copyOf(fieldsByCell, cellQuantities.size());
+    inOrder = new boolean[cellFields.length];
+    for (int i = 0; i < cellFields.length; i++) {
+      inOrder[i] = isInOrder(cellFields[i]);
+    }
     columns = new double[quantities.size()][FIRST_ROWS];
     gathered = new double[maxCells];
     grids = new CellGrid.Builder[cellQuantities.size()];
     for (int i = 0; i < grids.length; i++) {
       grids[i] = new CellGrid.Builder(maxCells);
     }
+  }
+
+  private static boolean isInOrder(int[] fields) {
+    for (int i = 1; i < fields.length; i++) {
+      if (fields[i] != fields[0] + i) {
+        return false;
+      }
+    }
+    return true;
   }
 
   /** Number of numbers that are kept of a row. */
@@ -84,7 +100,7 @@ final class EnsembleRows {
    * @param ensemble its number
    * @param secondsAfterFirst its time after the first ensemble (s)
    * @param cellCount its number of cells; what the row holds beyond them is dropped
-   * @param row its numbers by field
+   * @param row its numbers by field; those of cells beyond the number of cells may be changed
    */
   void add(long ensemble, double secondsAfterFirst, int cellCount, double[] row) {
     if (rows == number.length) {
@@ -98,11 +114,16 @@ final class EnsembleRows {
     }
     for (int i = 0; i < grids.length; i++) {
       int[] fields = cellFields[i];
-      for (int cell = 0; cell < cellCount; cell++) {
-        gathered[cell] = row[fields[cell]];
+      if (inOrder[i]) {
+        Arrays.fill(row, fields[0] + cellCount, fields[0] + fields.length, Double.NaN);
+        grids[i].addRow(row, fields[0]);
+      } else {
+        Arrays.fill(gathered, Double.NaN);
+        for (int cell = 0; cell < cellCount; cell++) {
+          gathered[cell] = row[fields[cell]];
+        }
+        grids[i].addRow(gathered);
       }
-      Arrays.fill(gathered, cellCount, gathered.length, Double.NaN);
-      grids[i].addRow(gathered);
     }
     rows++;
   }

@@ -1,7 +1,6 @@
 package org.crossreach.ingest;
 
 import de.siegmar.fastcsv.reader.AbstractBaseCsvCallbackHandler;
-import java.time.OffsetDateTime;
 import java.util.ArrayList;
 import java.util.List;
 import org.crossreach.survey.Ensembles;
@@ -20,9 +19,6 @@ final class EnsembleTable extends AbstractBaseCsvCallbackHandler<Object> {
   /** Most numbers that are kept of one file (2 GiB). */
   static final long MOST_NUMBERS = 1L << 28;
 
-  /** Longest time from the first ensemble to the last (s): 31 days. */
-  static final long LONGEST_S = 31L * 86_400;
-
   private static final String MISSING_REMEDY = "leave the field empty for a missing value";
 
   private final FileProblems problems;
@@ -30,34 +26,18 @@ final class EnsembleTable extends AbstractBaseCsvCallbackHandler<Object> {
   private final List<String> names = new ArrayList<>();
   private final Rfc3339 time = new Rfc3339();
   private EnsembleHeader header;
+  private EnsembleSequence sequence;
   private EnsembleRows rows;
-  private OffsetDateTime start;
-  private boolean endsQuoted;
-  private boolean blank;
   private boolean anyRow;
+  private boolean blank;
+  private boolean endsQuoted;
   private long problemsBefore;
 
   /** The numbers of the row that is being read, by field; empty until the header is known. */
   private double[] row = new double[0];
 
-  /**
-   * For each field the lowest and the highest number that need no second look; none for fields that
-   * are no numbers of the ensemble or of a cell.
-   */
+  /** For each field the lowest and the highest number; NaN for fields that are no numbers. */
   private double[] limits;
-
-  private int firstCellField;
-  private int cellSizeField;
-  private double number;
-  private double cells;
-  private boolean timeRead;
-  private double previousNumber = Double.NaN;
-  private boolean previousTimeRead;
-  private long previousSecond;
-  private int previousNano;
-  private boolean anyTime;
-  private long firstSecond;
-  private int firstNano;
 
   /**
    * Starts an empty table.
@@ -82,7 +62,7 @@ final class EnsembleTable extends AbstractBaseCsvCallbackHandler<Object> {
 
   /** The ensembles; to be called once, when there are rows and no problem. */
   Ensembles build() {
-    return rows.build(start);
+    return rows.build(sequence.start());
   }
 
   /** Line in which the row that is being read starts. */
@@ -92,9 +72,6 @@ final class EnsembleTable extends AbstractBaseCsvCallbackHandler<Object> {
 
   @Override
   protected void handleBegin(long startingLine) {
-    number = Double.NaN;
-    cells = Double.NaN;
-    timeRead = false;
     blank = false;
     problemsBefore = problems.count();
   }
@@ -151,17 +128,11 @@ final class EnsembleTable extends AbstractBaseCsvCallbackHandler<Object> {
     while (from < to && isSpace(buffer[to - 1])) {
       to--;
     }
-    return switch (column.role()) {
-      case TIME -> readTime(buffer, from, to);
-      case NUMBER -> number = readWhole(column, buffer, from, to);
-      case CELLS -> cells = readWhole(column, buffer, from, to);
-      case ENSEMBLE, CELL -> readNumber(column, buffer, from, to);
-    };
-  }
-
-  private double readNumber(EnsembleColumn column, char[] buffer, int from, int to) {
     if (isMissing(buffer, from, to)) {
       return Double.NaN;
+    }
+    if (column.role() == EnsembleColumn.Role.TIME) {
+      return readTime(buffer, from, to);
     }
     double value = Decimal.parse(buffer, from, to);
     if (column.range().holds(value)) {
@@ -173,31 +144,21 @@ final class EnsembleTable extends AbstractBaseCsvCallbackHandler<Object> {
         Quoted.of(buffer, from, to),
         Double.isNaN(value) ? "a number" : column.range().phrase(),
         Double.isNaN(value) ? remedyFor(buffer, from, to) : MISSING_REMEDY);
-    return Double.NaN;
+    return EnsembleSequence.FAULTY;
   }
 
-  private double readWhole(EnsembleColumn column, char[] buffer, int from, int to) {
-    double value = readNumber(column, buffer, from, to);
-    if (value == Math.rint(value)) {
-      return value;
-    }
-    if (!Double.isNaN(value)) {
-      problems.add(line(), column.name(), Quoted.of(buffer, from, to), "a whole number", "");
-    }
-    return Double.NaN;
-  }
-
+  /** Reads the time of the row; 0 when it was read. */
   private double readTime(char[] buffer, int from, int to) {
-    timeRead = time.parse(buffer, from, to);
-    if (!timeRead && !isMissing(buffer, from, to)) {
-      problems.add(
-          line(),
-          EnsembleColumn.TIME,
-          Quoted.of(buffer, from, to),
-          "a date and time with offset, for example 2031-04-18T09:30:00.25+01:00",
-          "");
+    if (time.parse(buffer, from, to)) {
+      return 0;
     }
-    return Double.NaN;
+    problems.add(
+        line(),
+        EnsembleColumn.TIME,
+        Quoted.of(buffer, from, to),
+        "a date and time with offset, for example 2031-04-18T09:30:00.25+01:00",
+        "");
+    return EnsembleSequence.FAULTY;
   }
 
   private static String remedyFor(char[] buffer, int from, int to) {
@@ -256,16 +217,16 @@ final class EnsembleTable extends AbstractBaseCsvCallbackHandler<Object> {
     if (!header.isUsable()) {
       throw new Stopped();
     }
+    sequence = new EnsembleSequence(header, problems);
     rows = new EnsembleRows(header);
-    row = new double[header.width()];
     limits = new double[2 * header.width()];
-    for (int i = 0; i < row.length; i++) {
-      boolean plain = header.isNumber(i);
-      limits[2 * i] = plain ? header.column(i).range().lowest() : Double.NaN;
-      limits[2 * i + 1] = plain ? header.column(i).range().highest() : Double.NaN;
+    for (int field = 0; field < header.width(); field++) {
+      EnsembleColumn column = header.column(field);
+      boolean number = column != null && column.role() != EnsembleColumn.Role.TIME;
+      limits[2 * field] = number ? column.range().lowest() : Double.NaN;
+      limits[2 * field + 1] = number ? column.range().highest() : Double.NaN;
     }
-    firstCellField = header.fieldOf(EnsembleColumn.FIRST_CELL);
-    cellSizeField = header.fieldOf(EnsembleColumn.CELL_SIZE);
+    row = new double[header.width()];
   }
 
   private void reportWidth(int found) {
@@ -286,12 +247,7 @@ final class EnsembleTable extends AbstractBaseCsvCallbackHandler<Object> {
   }
 
   private void takeRow() {
-    requireKey(EnsembleColumn.NUMBER, !Double.isNaN(number));
-    requireKey(EnsembleColumn.TIME, timeRead);
-    requireKey(EnsembleColumn.CELLS, !Double.isNaN(cells));
-    checkNumber();
-    checkTime();
-    checkCells();
+    sequence.check(line(), row, time);
     if (!problems.isEmpty()) {
       return;
     }
@@ -304,77 +260,7 @@ final class EnsembleTable extends AbstractBaseCsvCallbackHandler<Object> {
           "split the file, or leave out columns that are not needed");
       throw new Stopped();
     }
-    long nanos = (time.epochSecond() - firstSecond) * 1_000_000_000L + time.nano() - firstNano;
-    rows.add((long) number, nanos / 1e9, (int) cells, row);
-  }
-
-  /** A key that was not read, although nothing was wrong with its text, is missing. */
-  private void requireKey(String name, boolean read) {
-    if (!read && problems.count() == problemsBefore && header.fieldOf(name) >= 0) {
-      problems.add(line(), name, "nothing", "a value in every row", "complete the row");
-    }
-  }
-
-  private void checkNumber() {
-    if (number <= previousNumber) {
-      problems.add(
-          line(),
-          EnsembleColumn.NUMBER,
-          '"' + Long.toString((long) number) + "\" after \"" + (long) previousNumber + '"',
-          "a number above that of the row before",
-          "sort the rows, or remove repeated ones");
-    }
-    previousNumber = number;
-  }
-
-  private void checkTime() {
-    if (timeRead) {
-      long second = time.epochSecond();
-      if (!anyTime) {
-        anyTime = true;
-        firstSecond = second;
-        firstNano = time.nano();
-        start = time.toOffsetDateTime();
-      } else if (previousTimeRead
-          && (second < previousSecond || second == previousSecond && time.nano() <= previousNano)) {
-        problems.add(
-            line(),
-            EnsembleColumn.TIME,
-            "a time that is not after that of the row before",
-            "increasing times",
-            "sort the rows, or correct the clock");
-      } else if (Math.abs(second - firstSecond) > LONGEST_S) {
-        problems.add(
-            line(),
-            EnsembleColumn.TIME,
-            "a time " + Math.abs(second - firstSecond) / 86_400 + " days from the first one",
-            "all ensembles within " + LONGEST_S / 86_400 + " days",
-            "correct the date");
-      }
-      previousSecond = second;
-      previousNano = time.nano();
-    }
-    previousTimeRead = timeRead;
-  }
-
-  private void checkCells() {
-    if (cells > header.maxCells()) {
-      problems.add(
-          line(),
-          EnsembleColumn.CELLS,
-          '"' + Integer.toString((int) cells) + '"',
-          "at most " + header.maxCells() + ", the number of cells that have columns",
-          "add the missing columns, or correct the number");
-    } else if (cells > 0) {
-      requireForCells(firstCellField, EnsembleColumn.FIRST_CELL);
-      requireForCells(cellSizeField, EnsembleColumn.CELL_SIZE);
-    }
-  }
-
-  private void requireForCells(int field, String name) {
-    if (field >= 0 && Double.isNaN(row[field]) && problems.count() == problemsBefore) {
-      problems.add(line(), name, "nothing", "a number wherever there are cells", "");
-    }
+    rows.add(sequence.number(row), sequence.elapsedS(time), sequence.cells(row), row);
   }
 
   /** Ends the reading before the end of the file, after the reason was added to the problems. */

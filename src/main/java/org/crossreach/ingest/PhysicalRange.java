@@ -42,6 +42,8 @@ record PhysicalRange(double lowest, double highest, String unit) {
   static final PhysicalRange INTENSITY = new PhysicalRange(-200, 300, "dB");
   static final PhysicalRange PERCENTAGE = new PhysicalRange(0, 100, "%");
 
+  static final PhysicalRange CELLS = new PhysicalRange(0, EnsembleColumn.MOST_CELLS, "");
+
   /** An ensemble's number. */
   static final PhysicalRange NUMBER = new PhysicalRange(0, 999_999_999_999.0, "");
 
@@ -72,14 +74,10 @@ record PhysicalRange(double lowest, double highest, String unit) {
   /** The range as a phrase, for example {@code a number from -20 to 20 m/s}. */
   String phrase() {
     return "a number from "
-        + shown(lowest)
+        + Quoted.number(lowest)
         + " to "
-        + shown(highest)
+        + Quoted.number(highest)
         + (unit.isEmpty() ? "" : " " + unit);
-  }
-
-  private static String shown(double limit) {
-    return limit == Math.rint(limit) ? Long.toString((long) limit) : Double.toString(limit);
   }
 
   /** The range of a quantity that is recorded once per ensemble. */

@@ -23,6 +23,13 @@ final class Quoted {
             + (text.length() > SHOWN ? " (" + text.length() + " characters)" : "");
   }
 
+  /** A number as people write it: without decimals when it is whole. */
+  static String number(double value) {
+    return value == Math.rint(value) && Math.abs(value) < 1e15
+        ? Long.toString((long) value)
+        : Double.toString(value);
+  }
+
   /** The text's first characters. */
   static String cut(CharSequence text) {
     return cut(text, SHOWN);
