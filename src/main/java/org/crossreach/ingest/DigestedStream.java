@@ -17,7 +17,7 @@ import java.util.concurrent.BlockingQueue;
 final class DigestedStream extends InputStream {
 
   private static final int BLOCK = 1 << 17;
-  private static final int BLOCKS_AHEAD = 4;
+  private static final int BLOCKS_AHEAD = 16;
 
   /** Stands for the end of the file in the queue. */
   private static final Block END = new Block(new byte[0], 0);

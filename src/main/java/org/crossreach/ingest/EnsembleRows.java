@@ -12,13 +12,19 @@ import org.crossreach.survey.EnsembleQuantity;
 import org.crossreach.survey.Ensembles;
 
 /**
- * Collects the ensembles of one file as primitive columns.
+ * Collects the ensembles of one file and turns them into primitive columns.
  *
- * <p>A row's numbers are handed over by field, in the order of the file.
+ * <p>A row's numbers are handed over by field, in the order of the file. While the file is read
+ * everything lies in blocks that never move, since the number of rows is not known before its end.
  */
 final class EnsembleRows {
 
-  private static final int FIRST_ROWS = 1024;
+  /** Places in {@link #perEnsemble}, before the quantities. */
+  private static final int NUMBER = 0;
+
+  private static final int ELAPSED_S = 1;
+  private static final int CELLS = 2;
+  private static final int FIRST_QUANTITY = 3;
 
   private final EnsembleHeader header;
   private final List<EnsembleQuantity> quantities = new ArrayList<>();
@@ -33,12 +39,9 @@ final class EnsembleRows {
   /** For each quantity of cells whether its fields lie side by side in the order of the cells. */
   private final boolean[] inOrder;
 
-  private final double[][] columns;
-  private final CellGrid.Builder[] grids;
+  private final CellGrid.Builder perEnsemble;
+  private final CellGrid.Builder[] perCell;
   private final double[] gathered;
-  private long[] number = new long[FIRST_ROWS];
-  private double[] elapsedS = new double[FIRST_ROWS];
-  private int[] cells = new int[FIRST_ROWS];
   private int rows;
 
   EnsembleRows(EnsembleHeader header) {
@@ -64,15 +67,13 @@ final class EnsembleRows {
     quantityFields = Arrays.copyOf(fields, quantities.size());
     cellFields = Arrays.copyOf(fieldsByCell, cellQuantities.size());
     inOrder = new boolean[cellFields.length];
+    perCell = new CellGrid.Builder[cellFields.length];
     for (int i = 0; i < cellFields.length; i++) {
       inOrder[i] = isInOrder(cellFields[i]);
+      perCell[i] = new CellGrid.Builder(maxCells);
     }
-    columns = new double[quantities.size()][FIRST_ROWS];
-    gathered = new double[maxCells];
-    grids = new CellGrid.Builder[cellQuantities.size()];
-    for (int i = 0; i < grids.length; i++) {
-      grids[i] = new CellGrid.Builder(maxCells);
-    }
+    perEnsemble = new CellGrid.Builder(FIRST_QUANTITY + quantities.size());
+    gathered = new double[Math.max(maxCells, FIRST_QUANTITY + quantities.size())];
   }
 
   private static boolean isInOrder(int[] fields) {
@@ -86,7 +87,7 @@ final class EnsembleRows {
 
   /** Number of numbers that are kept of a row. */
   int width() {
-    return columns.length + grids.length * header.maxCells();
+    return FIRST_QUANTITY + quantities.size() + perCell.length * header.maxCells();
   }
 
   /** Number of rows so far. */
@@ -97,45 +98,33 @@ final class EnsembleRows {
   /**
    * Appends an ensemble.
    *
-   * @param ensemble its number
-   * @param secondsAfterFirst its time after the first ensemble (s)
+   * @param number its number
+   * @param elapsedS its time after the first ensemble (s)
    * @param cellCount its number of cells; what the row holds beyond them is dropped
    * @param row its numbers by field; those of cells beyond the number of cells may be changed
    */
-  void add(long ensemble, double secondsAfterFirst, int cellCount, double[] row) {
-    if (rows == number.length) {
-      grow();
+  void add(long number, double elapsedS, int cellCount, double[] row) {
+    gathered[NUMBER] = number;
+    gathered[ELAPSED_S] = elapsedS;
+    gathered[CELLS] = cellCount;
+    for (int i = 0; i < quantityFields.length; i++) {
+      gathered[FIRST_QUANTITY + i] = row[quantityFields[i]];
     }
-    number[rows] = ensemble;
-    elapsedS[rows] = secondsAfterFirst;
-    cells[rows] = cellCount;
-    for (int i = 0; i < columns.length; i++) {
-      columns[i][rows] = row[quantityFields[i]];
-    }
-    for (int i = 0; i < grids.length; i++) {
+    perEnsemble.addRow(gathered);
+    for (int i = 0; i < perCell.length; i++) {
       int[] fields = cellFields[i];
       if (inOrder[i]) {
         Arrays.fill(row, fields[0] + cellCount, fields[0] + fields.length, Double.NaN);
-        grids[i].addRow(row, fields[0]);
+        perCell[i].addRow(row, fields[0]);
       } else {
         Arrays.fill(gathered, Double.NaN);
         for (int cell = 0; cell < cellCount; cell++) {
           gathered[cell] = row[fields[cell]];
         }
-        grids[i].addRow(gathered);
+        perCell[i].addRow(gathered);
       }
     }
     rows++;
-  }
-
-  private void grow() {
-    int capacity = 2 * rows;
-    number = Arrays.copyOf(number, capacity);
-    elapsedS = Arrays.copyOf(elapsedS, capacity);
-    cells = Arrays.copyOf(cells, capacity);
-    for (int i = 0; i < columns.length; i++) {
-      columns[i] = Arrays.copyOf(columns[i], capacity);
-    }
   }
 
   /**
@@ -144,22 +133,30 @@ final class EnsembleRows {
    * @param start time of the first ensemble
    */
   Ensembles build(OffsetDateTime start) {
-    Map<EnsembleQuantity, double[]> ensembleColumns = new EnumMap<>(EnsembleQuantity.class);
-    for (int i = 0; i < columns.length; i++) {
-      ensembleColumns.put(quantities.get(i), Arrays.copyOf(columns[i], rows));
-      columns[i] = null;
+    CellGrid ensembles = perEnsemble.build();
+    long[] number = new long[rows];
+    int[] cells = new int[rows];
+    for (int row = 0; row < rows; row++) {
+      number[row] = (long) ensembles.get(row, NUMBER);
+      cells[row] = (int) ensembles.get(row, CELLS);
     }
-    Map<CellQuantity, CellGrid> cellGrids = new EnumMap<>(CellQuantity.class);
-    for (int i = 0; i < grids.length; i++) {
-      cellGrids.put(cellQuantities.get(i), grids[i].build());
+    Map<EnsembleQuantity, double[]> columns = new EnumMap<>(EnsembleQuantity.class);
+    for (int i = 0; i < quantities.size(); i++) {
+      columns.put(quantities.get(i), column(ensembles, FIRST_QUANTITY + i));
+    }
+    Map<CellQuantity, CellGrid> grids = new EnumMap<>(CellQuantity.class);
+    for (int i = 0; i < perCell.length; i++) {
+      grids.put(cellQuantities.get(i), perCell[i].build());
     }
     return new Ensembles(
-        header.frame(),
-        start,
-        Arrays.copyOf(number, rows),
-        Arrays.copyOf(elapsedS, rows),
-        Arrays.copyOf(cells, rows),
-        ensembleColumns,
-        cellGrids);
+        header.frame(), start, number, column(ensembles, ELAPSED_S), cells, columns, grids);
+  }
+
+  private static double[] column(CellGrid grid, int place) {
+    double[] column = new double[grid.rows()];
+    for (int row = 0; row < column.length; row++) {
+      column[row] = grid.get(row, place);
+    }
+    return column;
   }
 }
