@@ -49,4 +49,18 @@ public enum Quantity {
       case US -> value * feet;
     };
   }
+
+  /**
+   * Values in the reader's unit, as a fresh array.
+   *
+   * @param units the reader's system
+   * @param values the values in SI
+   */
+  public double[] in(Units units, double[] values) {
+    double[] converted = new double[values.length];
+    for (int i = 0; i < values.length; i++) {
+      converted[i] = in(units, values[i]);
+    }
+    return converted;
+  }
 }

@@ -97,6 +97,14 @@ public final class ScreenedPass {
     return facts.cellSizeM(ensemble);
   }
 
+  /**
+   * Depth below the water surface to which a cell may reach before side lobes return from the bed
+   * (m), filled in where no beam has a depth.
+   */
+  public double sideLobeLimitM(int ensemble) {
+    return draftM() + facts.lowestM()[ensemble];
+  }
+
   /** Whether a cell may be used. */
   public boolean usable(int ensemble, int cell) {
     return reasons[ensemble * maxCells() + cell] == 0;
