@@ -89,7 +89,7 @@ final class Reduce implements Callable<Integer> {
         () -> {
           OutputFolder files = OutputFolder.claim(target);
           for (FileKind kind : wanted) {
-            kind.write(result, files);
+            kind.write(result, output.units, files);
           }
         });
     if (!output.quiet) {
