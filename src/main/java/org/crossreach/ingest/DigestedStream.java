@@ -10,28 +10,36 @@ import java.util.concurrent.BlockingQueue;
 /**
  * The bytes of a file, digested by SHA-256 on another core while they are read on this one.
  *
- * <p>Each block goes to the digesting thread as soon as it has been read, so that both work on the
- * same bytes; at most {@value #BLOCKS_AHEAD} blocks wait. Digesting is a fifth of the work of
- * reading a table.
+ * <p>Each block goes to the digesting thread when it has been read, so that both see the same
+ * bytes, and comes back to be filled again; at most {@value #BLOCKS} blocks are under way.
+ * Digesting is a fifth of the work of reading a table.
  */
 final class DigestedStream extends InputStream {
 
-  private static final int BLOCK = 1 << 17;
-  private static final int BLOCKS_AHEAD = 16;
+  private static final int BLOCK = 1 << 16;
+  private static final int BLOCKS = 16;
 
   /** Stands for the end of the file in the queue. */
-  private static final Block END = new Block(new byte[0], 0);
+  private static final Block END = new Block(new byte[0]);
 
   private final InputStream file;
   private final MessageDigest digest = StoredFile.sha256();
-  private final BlockingQueue<Block> waiting = new ArrayBlockingQueue<>(BLOCKS_AHEAD);
+  private final BlockingQueue<Block> read = new ArrayBlockingQueue<>(BLOCKS + 1);
+  private final BlockingQueue<Block> digested = new ArrayBlockingQueue<>(BLOCKS);
   private final Thread digester = new Thread(this::digest, "digest");
   private Block current = END;
   private int at;
-  private boolean ended;
+  private int blocks;
 
-  /** Bytes that are only read any more once they are here. */
-  private record Block(byte[] bytes, int size) {}
+  /** Some bytes of the file; in the hands of one thread at a time. */
+  private static final class Block {
+    private final byte[] bytes;
+    private int size;
+
+    Block(byte[] bytes) {
+      this.bytes = bytes;
+    }
+  }
 
   /** Starts before the first byte of a file. */
   DigestedStream(InputStream file) {
@@ -56,28 +64,34 @@ final class DigestedStream extends InputStream {
     return at == current.size && !next() ? -1 : current.bytes[at++] & 0xff;
   }
 
-  /** Reads the next block; false at the end of the file. */
+  /** Hands the current block on and reads the next one; false at the end of the file. */
   private boolean next() throws IOException {
-    if (ended) {
+    if (current == END && blocks > 0) {
       return false;
     }
-    byte[] bytes = new byte[BLOCK];
-    int size = file.readNBytes(bytes, 0, BLOCK);
-    at = 0;
-    current = size == 0 ? END : new Block(bytes, size);
-    ended = size == 0;
     try {
-      waiting.put(current);
+      if (current != END) {
+        read.put(current);
+      }
+      Block next = blocks < BLOCKS ? new Block(new byte[BLOCK]) : digested.take();
+      blocks = Math.min(BLOCKS, blocks + 1);
+      next.size = file.readNBytes(next.bytes, 0, BLOCK);
+      at = 0;
+      current = next.size == 0 ? END : next;
+      if (current == END) {
+        read.put(END);
+      }
     } catch (InterruptedException e) {
       throw interrupted();
     }
-    return !ended;
+    return current != END;
   }
 
   private void digest() {
     try {
-      for (Block block = waiting.take(); block != END; block = waiting.take()) {
+      for (Block block = read.take(); block != END; block = read.take()) {
         digest.update(block.bytes, 0, block.size);
+        digested.put(block);
       }
     } catch (InterruptedException e) {
       Thread.currentThread().interrupt(); // closed before the end: nobody asks for the digest
@@ -90,8 +104,8 @@ final class DigestedStream extends InputStream {
    * @return SHA-256 as 64 lower-case hexadecimal digits
    */
   String sha256() throws IOException {
-    while (!ended) {
-      next();
+    while (next()) {
+      at = current.size;
     }
     try {
       digester.join();
