@@ -3,6 +3,7 @@ package org.crossreach.cli;
 import java.io.IOException;
 import java.io.PrintWriter;
 import java.io.UncheckedIOException;
+import org.crossreach.report.CheckReport;
 import org.crossreach.report.ProgramVersion;
 import org.crossreach.survey.Problem;
 import org.crossreach.survey.UnusableInput;
@@ -91,12 +92,10 @@ final class Failures implements IParameterExceptionHandler, IExecutionExceptionH
     for (Problem problem : unusable.problems()) {
       err.println(problem);
     }
-    err.println(PROGRAM + count(unusable.problems().size()) + "; nothing was written");
+    err.println(
+        PROGRAM
+            + CheckReport.counted(unusable.problems().size(), "problem")
+            + "; nothing was written");
     return ExitCode.UNREADABLE_INPUT;
-  }
-
-  /** The number of problems in words, for example {@code 1 problem} or {@code 3 problems}. */
-  static String count(int problems) {
-    return problems + (problems == 1 ? " problem" : " problems");
   }
 }
