@@ -12,6 +12,9 @@ final class AlignedRows {
   private static final int REACH = RowWindow.REACH;
   private static final int ROWS = 2 * REACH + 1;
 
+  /** The rows before and after the middle one. */
+  private static final int[] NEAREST_FIRST = {2, 4, 1, 5, 0, 6};
+
   private final CellFacts facts;
   private final RowWindow window;
   private final double[][] east = new double[ROWS][];
@@ -66,6 +69,39 @@ final class AlignedRows {
     }
     east[row] = shiftedEast[row];
     north[row] = shiftedNorth[row];
+  }
+
+  /**
+   * Whether several cells of the same depth before and after lie so near to one of the middle
+   * ensemble, in each component both relative to the middle of their ensembles and as they are,
+   * that any median of which they are more than half does, too. This settles nearly every cell
+   * without a median.
+   *
+   * @param enough how many must
+   * @param relative how near (m/s) relative to the middle of their ensembles
+   * @param asTheyAre how near (m/s) as they are
+   */
+  boolean mostAgree(int cell, int enough, double relative, double asTheyAre) {
+    double e = east[REACH][cell];
+    double n = north[REACH][cell];
+    double toMiddleEast = e - middleEast[REACH];
+    double toMiddleNorth = n - middleNorth[REACH];
+    int near = 0;
+    for (int row : NEAREST_FIRST) {
+      if (east[row] == null) {
+        continue;
+      }
+      double otherEast = east[row][cell];
+      double otherNorth = north[row][cell];
+      if (Math.abs(otherEast - e) <= asTheyAre
+          && Math.abs(otherNorth - n) <= asTheyAre
+          && Math.abs(otherEast - middleEast[row] - toMiddleEast) <= relative
+          && Math.abs(otherNorth - middleNorth[row] - toMiddleNorth) <= relative
+          && ++near == enough) {
+        return true;
+      }
+    }
+    return false;
   }
 
   /** Chooses how velocities stand: relative to the middle of their ensemble, or as they are. */

@@ -90,15 +90,17 @@ final class BeamDepths {
     found.add(new FoundLimit(Criterion.DEPTH_BEAMS, limit.kind(), Double.NaN, share));
     double least = given ? 0 : FLOOR_M;
     for (double[] beam : depthM) {
-      double[] running = RunningMedian.of(beam, REACH);
-      double[] before = RunningMedian.beside(beam, BESIDE, -1);
-      double[] after = RunningMedian.beside(beam, BESIDE, 1);
+      double[] before = beam.clone();
       for (int i = 0; i < middle.length; i++) {
+        double depth = before[i];
+        if (Double.isNaN(depth)) {
+          continue;
+        }
         boolean apart =
-            departs(beam[i], running[i], share, least) && departs(beam[i], middle[i], share, least);
+            departs(depth, middle[i], share, least)
+                && departs(depth, RunningMedian.at(before, i, REACH), share, least);
         boolean farApart =
-            majority[i] && departs(beam[i], middle[i], ALONE_SHARE, 0)
-                || juts(beam[i], before[i], after[i]);
+            majority[i] && departs(depth, middle[i], ALONE_SHARE, 0) || juts(before, i);
         if (apart || farApart) {
           beam[i] = Double.NaN;
           rejected++;
@@ -108,10 +110,21 @@ final class BeamDepths {
   }
 
   /** Whether a depth is by far greater, or by far smaller, than both before and after. */
-  private static boolean juts(double depth, double before, double after) {
-    double least = Math.min(before, after);
-    double most = Math.max(before, after);
-    return depth > (1 + ALONE_SHARE) * most || depth < (1 - ALONE_SHARE) * least;
+  private static boolean juts(double[] depths, int i) {
+    int previous = RunningMedian.next(depths, i, -1);
+    int following = RunningMedian.next(depths, i, 1);
+    if (previous < 0 || following >= depths.length) {
+      return false;
+    }
+    double depth = depths[i];
+    if (!departs(depth, depths[previous], ALONE_SHARE, 0)
+        && !departs(depth, depths[following], ALONE_SHARE, 0)) {
+      return false;
+    }
+    double before = RunningMedian.beside(depths, i, BESIDE, -1);
+    double after = RunningMedian.beside(depths, i, BESIDE, 1);
+    return depth > (1 + ALONE_SHARE) * Math.max(before, after)
+        || depth < (1 - ALONE_SHARE) * Math.min(before, after);
   }
 
   private static boolean departs(double depth, double from, double share, double least) {

@@ -5,13 +5,15 @@ package org.crossreach.screen;
  * needed.
  *
  * <p>Velocities are over the ground where the boat's is known, else relative to the boat. With each
- * ensemble stands its middle, the component-wise median over its used cells.
+ * ensemble stands its middle, the component-wise median over at most nine of its used cells, spread
+ * evenly: more would cost much and tell little.
  */
 final class RowWindow {
 
   /** Neighbours kept on either side. */
   static final int REACH = 3;
 
+  private static final int ENOUGH_FOR_MIDDLE = 9;
   private static final int SLOTS = 2 * REACH + 1;
 
   private final CellFacts facts;
@@ -68,14 +70,16 @@ final class RowWindow {
       count += accepted ? 1 : 0;
     }
     used[slot] = count;
-    middleEast[slot] = median(east[slot]);
-    middleNorth[slot] = median(north[slot]);
+    middleEast[slot] = median(east[slot], count);
+    middleNorth[slot] = median(north[slot], count);
   }
 
-  private double median(double[] values) {
+  private double median(double[] values, int present) {
+    int stride = Math.max(1, (present + ENOUGH_FOR_MIDDLE - 1) / ENOUGH_FOR_MIDDLE);
+    int seen = 0;
     int count = 0;
     for (double value : values) {
-      if (!Double.isNaN(value)) {
+      if (!Double.isNaN(value) && seen++ % stride == 0) {
         scratch[count++] = value;
       }
     }

@@ -1,70 +1,66 @@
 package org.crossreach.screen;
 
 /**
- * The running median of a column: each value's median with its neighbours on both sides.
+ * Medians of the values beside one value of a column. Missing values are passed over.
  *
- * <p>The same number of neighbours is taken on either side, so that a column that only rises or
- * only falls comes back unchanged, and a step stays a step. Missing values are passed over; the
- * first and the last value have no neighbour on one side and come back unchanged.
+ * <p>Found where they are asked for, since nearly every value is settled without.
  */
 final class RunningMedian {
 
   private RunningMedian() {}
 
   /**
-   * The running median of a column.
+   * The median of a value with its neighbours on both sides, the same number on either side, so
+   * that a column that only rises or only falls comes back unchanged, and a step stays a step. The
+   * first and the last value have no neighbour on one side and come back unchanged.
    *
    * @param values the column, NaN where missing
+   * @param i which value, not missing
    * @param reach most neighbours taken on either side, at least 1
-   * @return as many values, NaN where the column has none
    */
-  static double[] of(double[] values, int reach) {
-    double[] present = new double[values.length];
-    int size = 0;
-    for (double value : values) {
-      if (!Double.isNaN(value)) {
-        present[size++] = value;
-      }
-    }
+  static double at(double[] values, int i, int reach) {
     double[] window = new double[2 * reach + 1];
-    double[] result = new double[values.length];
-    int at = 0;
-    for (int i = 0; i < values.length; i++) {
-      if (Double.isNaN(values[i])) {
-        result[i] = Double.NaN;
-        continue;
+    int size = 0;
+    int before = i;
+    int after = i;
+    window[size++] = values[i];
+    for (int n = 0; n < reach; n++) {
+      before = next(values, before, -1);
+      after = next(values, after, 1);
+      if (before < 0 || after >= values.length) {
+        break;
       }
-      int side = Math.min(reach, Math.min(at, size - 1 - at));
-      System.arraycopy(present, at - side, window, 0, 2 * side + 1);
-      result[i] = Median.of(window, 2 * side + 1);
-      at++;
+      window[size++] = values[before];
+      window[size++] = values[after];
     }
-    return result;
+    return Median.of(window, size);
   }
 
   /**
-   * The median of the values on one side of each value.
+   * The median of the values on one side of a value.
    *
    * @param values the column, NaN where missing
+   * @param i which value
    * @param count most values taken, at least 1
    * @param way -1 for those before, 1 for those after
-   * @return as many values, NaN where the column has none on that side
+   * @return NaN when there is none on that side
    */
-  static double[] beside(double[] values, int count, int way) {
+  static double beside(double[] values, int i, int count, int way) {
     double[] window = new double[count];
-    double[] last = new double[count];
-    double[] result = new double[values.length];
-    int seen = 0;
-    int first = way < 0 ? 0 : values.length - 1;
-    for (int i = first; i >= 0 && i < values.length; i -= way) {
-      int size = Math.min(seen, count);
-      System.arraycopy(last, 0, window, 0, size);
-      result[i] = Median.of(window, size);
-      if (!Double.isNaN(values[i])) {
-        last[seen % count] = values[i];
-        seen++;
-      }
+    int size = 0;
+    for (int j = next(values, i, way); size < count && j >= 0 && j < values.length; ) {
+      window[size++] = values[j];
+      j = next(values, j, way);
     }
-    return result;
+    return Median.of(window, size);
+  }
+
+  /** Index of the next value that is not missing, beyond the column's end when there is none. */
+  static int next(double[] values, int i, int way) {
+    int j = i + way;
+    while (j >= 0 && j < values.length && Double.isNaN(values[j])) {
+      j += way;
+    }
+    return j;
   }
 }

@@ -8,26 +8,31 @@ package org.crossreach.screen;
  * known, so that an ensemble that is bad in half of its cells shows. An ensemble with fewer than
  * four used cells has no middle worth the name and is compared over the ground alone.
  *
- * <p>Neighbours are the cells of the same depth in the three ensembles before and after, and, where
- * the ensemble has usable cells both above and below, those above and below in the ensemble itself
- * and in the one before and after: at most twelve. Depth counts on both sides or not at all, so
- * that the shear near the bed is no departure. The departure is the length of the vector from the
- * component-wise median of the neighbours. Where velocity changes across, as on a steep bank, what
- * that explains is allowed on top of the least limit. A cell with fewer than three neighbours is
- * not judged. One screen belongs to one thread.
+ * <p>Neighbours are the cells of the same depth in the three ensembles before and after; where
+ * fewer than three of them are used, those above and below in the ensemble itself and in the one
+ * before and after as well, if the ensemble has usable cells on both sides: depth counts on both
+ * sides or not at all, so that the shear near the bed is no departure. The departure is the length
+ * of the vector from the component-wise median of the neighbours. Where velocity changes across, as
+ * on a steep bank, what that explains is allowed on top of the least limit. A cell with fewer than
+ * three neighbours is not judged. One screen belongs to one thread.
  */
 final class SpikeScreen {
 
   private static final int REACH = RowWindow.REACH;
   private static final int FEWEST_NEIGHBOURS = 3;
   private static final int FEWEST_CELLS = 4;
+  private static final int MOST_NEIGHBOURS = 2 * REACH + 6;
+
+  /** More than half of the cells of the same depth before and after. */
+  private static final int MAJORITY = REACH + 1;
+
   private static final double HALF_SQRT_2 = Math.sqrt(0.5);
 
   private final CellFacts facts;
   private final RowWindow window;
   private final AlignedRows rows;
-  private final double[] nearEast = new double[12];
-  private final double[] nearNorth = new double[12];
+  private final double[] nearEast = new double[MOST_NEIGHBOURS];
+  private final double[] nearNorth = new double[MOST_NEIGHBOURS];
   private boolean hasMiddle;
   private int neighbours;
   private double departureEast;
@@ -52,16 +57,14 @@ final class SpikeScreen {
    * @param reasons reasons of the ensemble's cells; a used one that departs becomes a spike
    */
   void mark(SpikeLimits limits, byte[] reasons) {
-    for (boolean toMiddle : new boolean[] {true, false}) {
-      if (!compares(toMiddle)) {
-        continue;
-      }
-      double limit = toMiddle ? limits.relative() : limits.overGround();
-      rows.relative(toMiddle);
-      for (int k = 0; k < reasons.length; k++) {
-        if (reasons[k] == 0 && departs(k, limit, limits.least())) {
-          reasons[k] = Reason.SPIKE.code();
-        }
+    double relative = compares(true) ? limits.relative() : Double.POSITIVE_INFINITY;
+    double overGround = compares(false) ? limits.overGround() : Double.POSITIVE_INFINITY;
+    for (int k = 0; k < reasons.length; k++) {
+      if (reasons[k] == 0
+          && !rows.mostAgree(k, MAJORITY, relative * HALF_SQRT_2, overGround * HALF_SQRT_2)
+          && (departs(k, true, relative, limits.least())
+              || departs(k, false, overGround, limits.least()))) {
+        reasons[k] = Reason.SPIKE.code();
       }
     }
   }
@@ -71,7 +74,8 @@ final class SpikeScreen {
     return toMiddle ? hasMiddle : facts.boatKnown();
   }
 
-  private boolean departs(int cell, double limit, double least) {
+  private boolean departs(int cell, boolean toMiddle, double limit, double least) {
+    rows.relative(toMiddle);
     collect(cell);
     if (neighbours < FEWEST_NEIGHBOURS || agrees(cell, limit * HALF_SQRT_2)) {
       return false;
@@ -163,7 +167,7 @@ final class SpikeScreen {
       take(-d, cell);
       take(d, cell);
     }
-    if (rows.has(0, cell - 1) && rows.has(0, cell + 1)) {
+    if (neighbours < FEWEST_NEIGHBOURS && rows.has(0, cell - 1) && rows.has(0, cell + 1)) {
       for (int d = -1; d <= 1; d++) {
         take(d, cell - 1);
         take(d, cell + 1);
@@ -180,19 +184,18 @@ final class SpikeScreen {
   }
 
   /**
-   * Whether more than half of the neighbours lie so near in both components that their medians do,
-   * too: this settles nearly every cell without a median.
+   * Whether the medians of the neighbours must be near, since in each component most of them are.
    */
   private boolean agrees(int cell, double near) {
     double e = rows.east(0, cell);
     double n = rows.north(0, cell);
-    int count = 0;
+    int nearInEast = 0;
+    int nearInNorth = 0;
     for (int j = 0; j < neighbours; j++) {
-      if (Math.abs(nearEast[j] - e) <= near && Math.abs(nearNorth[j] - n) <= near) {
-        count++;
-      }
+      nearInEast += Math.abs(nearEast[j] - e) <= near ? 1 : 0;
+      nearInNorth += Math.abs(nearNorth[j] - n) <= near ? 1 : 0;
     }
-    return 2 * count > neighbours;
+    return 2 * Math.min(nearInEast, nearInNorth) > neighbours;
   }
 
   private void compare(int cell) {

@@ -87,24 +87,28 @@ final class VectorJumps {
   }
 
   private boolean[] search(double limit, double least) {
-    double[] middleEast = RunningMedian.of(east, REACH);
-    double[] middleNorth = RunningMedian.of(north, REACH);
-    double[] beforeEast = RunningMedian.beside(east, REACH, -1);
-    double[] beforeNorth = RunningMedian.beside(north, REACH, -1);
-    double[] afterEast = RunningMedian.beside(east, REACH, 1);
-    double[] afterNorth = RunningMedian.beside(north, REACH, 1);
     int[] present = present();
     boolean[] jumps = new boolean[east.length];
+    double beside = BESIDE_SHARE * limit;
     for (int p = 1; p + 1 < present.length; p++) {
-      int i = present[p];
-      double change = length(afterEast[i] - beforeEast[i], afterNorth[i] - beforeNorth[i]);
-      jumps[i] =
-          length(east[i] - middleEast[i], north[i] - middleNorth[i])
-                  > Math.max(limit, least + 0.5 * change)
-              && fromMean(present, p) > BESIDE_SHARE * limit
-              && (p < 2 || p + 2 >= present.length || fromCubic(present, p) > BESIDE_SHARE * limit);
+      jumps[present[p]] =
+          fromMean(present, p) > beside
+              && (p < 2 || p + 2 >= present.length || fromCubic(present, p) > beside)
+              && departs(present[p], limit, least);
     }
     return jumps;
+  }
+
+  private boolean departs(int i, double limit, double least) {
+    double change =
+        length(
+            RunningMedian.beside(east, i, REACH, 1) - RunningMedian.beside(east, i, REACH, -1),
+            RunningMedian.beside(north, i, REACH, 1) - RunningMedian.beside(north, i, REACH, -1));
+    double departure =
+        length(
+            east[i] - RunningMedian.at(east, i, REACH),
+            north[i] - RunningMedian.at(north, i, REACH));
+    return departure > Math.max(limit, least + 0.5 * change);
   }
 
   private int[] present() {

@@ -1,10 +1,12 @@
 package org.crossreach.screen;
 
+import java.util.Arrays;
+
 /**
  * Room for the water velocities of one ensemble, to be filled again for each ensemble.
  *
  * <p>Components in m/s on true east and north, relative to the boat, indexed by cell. One row
- * belongs to one thread.
+ * belongs to one thread and one pass.
  */
 public final class VelocityRow {
 
@@ -24,6 +26,8 @@ public final class VelocityRow {
     north = new double[cells];
     up = new double[cells];
     error = new double[cells];
+    Arrays.fill(up, Double.NaN);
+    Arrays.fill(error, Double.NaN);
   }
 
   /** Eastward velocity of the water relative to the boat (m/s). */

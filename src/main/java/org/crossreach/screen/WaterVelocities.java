@@ -34,11 +34,13 @@ final class WaterVelocities {
   void read(int ensemble, VelocityRow row, boolean all) {
     first.copyRow(ensemble, row.east);
     second.copyRow(ensemble, row.north);
-    if (all || turn.needsAll()) {
+    // A level record without them leaves the row's own NaN.
+    boolean more = turn.needsAll() || all && (third != null || fourth != null);
+    if (more) {
       copy(third, ensemble, row.up);
       copy(fourth, ensemble, row.error);
     }
-    turn.turn(ensemble, row, first.cells(), all);
+    turn.turn(ensemble, row, first.cells(), more);
   }
 
   private static void copy(CellGrid grid, int ensemble, double[] target) {

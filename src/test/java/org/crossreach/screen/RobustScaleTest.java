@@ -4,7 +4,6 @@ import static org.junit.jupiter.api.Assertions.assertArrayEquals;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
-import java.util.Arrays;
 import java.util.Random;
 import org.apache.commons.math3.distribution.NormalDistribution;
 import org.apache.commons.math3.stat.descriptive.rank.Percentile;
@@ -86,19 +85,29 @@ class RobustScaleTest {
   void runningMedianKeepsSlopesAndStepsAndDropsSpikes() {
     double nan = Double.NaN;
     double[] slope = {1, 2, 3, nan, 5, 6, 9, 10};
-    assertArrayEquals(slope, RunningMedian.of(slope, 3));
+    assertArrayEquals(slope, running(slope, 3));
     double[] step = {0, 0, 0, 0, 7, 7, 7, 7};
-    assertArrayEquals(step, RunningMedian.of(step, 2));
+    assertArrayEquals(step, running(step, 2));
     double[] spikes = {0, 0, 9, 9, nan, 0, 0, 0};
     double[] without = {0, 0, 0, 0, nan, 0, 0, 0};
-    assertArrayEquals(without, RunningMedian.of(spikes, 3));
-    assertArrayEquals(new double[] {4}, RunningMedian.of(new double[] {4}, 3));
+    assertArrayEquals(without, running(spikes, 3));
+    assertArrayEquals(new double[] {4}, running(new double[] {4}, 3));
   }
 
   @Test
-  void runningMedianLeavesItsInputAlone() {
-    double[] values = {3, 1, 2};
-    RunningMedian.of(values, 1);
-    assertEquals("[3.0, 1.0, 2.0]", Arrays.toString(values));
+  void medianOfOneSidePassesOverWhatIsMissing() {
+    double nan = Double.NaN;
+    double[] values = {8, 1, nan, 5, 100, nan, 3, 2};
+    assertEquals(5, RunningMedian.beside(values, 4, 3, -1));
+    assertEquals(2.5, RunningMedian.beside(values, 4, 3, 1));
+    assertEquals(nan, RunningMedian.beside(values, 0, 3, -1));
+  }
+
+  private static double[] running(double[] values, int reach) {
+    double[] result = new double[values.length];
+    for (int i = 0; i < values.length; i++) {
+      result[i] = Double.isNaN(values[i]) ? values[i] : RunningMedian.at(values, i, reach);
+    }
+    return result;
   }
 }
