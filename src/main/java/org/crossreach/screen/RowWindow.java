@@ -86,6 +86,23 @@ final class RowWindow {
     return Median.of(scratch, count);
   }
 
+  /**
+   * Median of a component of a loaded ensemble over all cells that are still used (m/s), NaN when
+   * there is none.
+   *
+   * @param values the ensemble's {@link #east} or {@link #north}
+   * @param why reasons of its cells
+   */
+  double medianOfUsed(double[] values, byte[] why) {
+    int count = 0;
+    for (int k = 0; k < why.length; k++) {
+      if (why[k] == 0) {
+        scratch[count++] = values[k];
+      }
+    }
+    return Median.of(scratch, count);
+  }
+
   /** Eastward velocities (m/s) of a loaded ensemble, NaN where a cell is not used. */
   double[] east(int ensemble) {
     return east[ensemble % SLOTS];

@@ -10,11 +10,18 @@ package org.crossreach.screen;
  */
 record SpikeLimits(double relative, double overGround, double ensemble, double least) {
 
+  private static final double SHARPER = 0.9;
+
   static final SpikeLimits NONE = new SpikeLimits(Double.NaN, Double.NaN, Double.NaN, Double.NaN);
 
   /** The same limit for all. */
   static SpikeLimits of(double limit) {
     return new SpikeLimits(limit, limit, limit, limit);
+  }
+
+  /** Whether comparing relative to the middle is clearly sharper than over the ground. */
+  boolean relativeIsSharper() {
+    return relative < SHARPER * overGround;
   }
 
   /** The limit that is reported: the narrower one of a cell. */

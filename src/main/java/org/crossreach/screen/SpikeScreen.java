@@ -3,10 +3,10 @@ package org.crossreach.screen;
 /**
  * Compares each cell with its neighbours in time and depth.
  *
- * <p>Cells are compared in two ways: relative to the middle of their own ensemble, so that neither
- * the boat's own motion nor its error shows; and over the ground, where the boat's velocity is
- * known, so that an ensemble that is bad in half of its cells shows. An ensemble with fewer than
- * four used cells has no middle worth the name and is compared over the ground alone.
+ * <p>Cells are compared over the ground, so that the boat's own motion does not show; and, where
+ * the boat's velocity is unknown or so uncertain that the comparison is sharper that way, relative
+ * to the middle of their own ensemble. An ensemble with fewer than four used cells has no middle
+ * worth the name and is compared over the ground alone.
  *
  * <p>Neighbours are the cells of the same depth in the three ensembles before and after; where
  * fewer than three of them are used, those above and below in the ensemble itself and in the one
@@ -55,9 +55,12 @@ final class SpikeScreen {
    *
    * @param limits largest departures (m/s), NaN where nothing is known to judge by
    * @param reasons reasons of the ensemble's cells; a used one that departs becomes a spike
+   * @return whether any cell departs
    */
-  void mark(SpikeLimits limits, byte[] reasons) {
-    double relative = compares(true) ? limits.relative() : Double.POSITIVE_INFINITY;
+  boolean mark(SpikeLimits limits, byte[] reasons) {
+    boolean any = false;
+    boolean both = compares(true) && (!compares(false) || limits.relativeIsSharper());
+    double relative = both ? limits.relative() : Double.POSITIVE_INFINITY;
     double overGround = compares(false) ? limits.overGround() : Double.POSITIVE_INFINITY;
     for (int k = 0; k < reasons.length; k++) {
       if (reasons[k] == 0
@@ -65,8 +68,10 @@ final class SpikeScreen {
           && (departs(k, true, relative, limits.least())
               || departs(k, false, overGround, limits.least()))) {
         reasons[k] = Reason.SPIKE.code();
+        any = true;
       }
     }
+    return any;
   }
 
   /** Whether the ensemble's cells can be compared in a way. */

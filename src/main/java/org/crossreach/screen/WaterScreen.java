@@ -239,16 +239,14 @@ final class WaterScreen {
     for (int i = 0; i < facts.size(); i++) {
       spikes.centreOn(i);
       System.arraycopy(window.reasons(i), 0, why, 0, cells);
-      if (!Double.isNaN(limits.least())) {
-        spikes.mark(limits, why);
-      }
+      boolean spiked = !Double.isNaN(limits.least()) && spikes.mark(limits, why);
       boolean[] withoutError = window.withoutError(i);
       for (int k = 0; k < cells; k++) {
         three[i] += why[k] == 0 && withoutError[k] ? 1 : 0;
       }
       System.arraycopy(why, 0, reasons, i * cells, cells);
-      middleEast[i] = window.middleEast(i);
-      middleNorth[i] = window.middleNorth(i);
+      middleEast[i] = spiked ? window.medianOfUsed(window.east(i), why) : window.middleEast(i);
+      middleNorth[i] = spiked ? window.medianOfUsed(window.north(i), why) : window.middleNorth(i);
     }
     if (facts.boatKnown() && !Double.isNaN(limits.ensemble())) {
       boolean[] jumps =
