@@ -2,7 +2,6 @@ package org.crossreach.report.chart;
 
 import java.awt.Graphics2D;
 import java.awt.geom.Line2D;
-import java.awt.geom.Path2D;
 import java.awt.geom.Rectangle2D;
 import java.util.List;
 import org.crossreach.agreement.Result;
@@ -30,7 +29,9 @@ public record PassDots(Result result, String marked, Units units, ChartStyle sty
   private static final double ROW = 11;
   private static final double WIDTH_FOR_KEY = 400;
   private static final double MARK = 3;
+  private static final double PICKED = 4;
   private static final double NAME = 7.5;
+  private static final double DENSE = 4;
 
   /**
    * Largest departure of a pass from the mean that is usual (%). Source: Oberg, Morlock and
@@ -149,58 +150,57 @@ public record PassDots(Result result, String marked, Units units, ChartStyle sty
   }
 
   private void marks(Graphics2D graphics, Plane plane) {
+    double spacing = plane.y(1) - plane.y(0);
     for (int p = 0; p < passes().size(); p++) {
       PassDischarge pass = passes().get(p);
-      double x = plane.x(Quantity.DISCHARGE.in(units, pass.totalM3s()));
       double y = plane.y(p);
-      graphics.setPaint(style.faint());
-      graphics.setStroke(style.line(0.4));
-      graphics.draw(new Line2D.Double(plane.area().getMinX(), y, plane.area().getMaxX(), y));
-      mark(
-          graphics,
-          x,
-          y,
-          pass.pass().startBank() == Bank.LEFT ? 1 : -1,
-          pass.pass().used(),
-          pass.pass().name().equals(marked));
+      if (spacing > DENSE) {
+        graphics.setPaint(style.faint());
+        graphics.setStroke(style.line(0.4));
+        graphics.draw(new Line2D.Double(plane.area().getMinX(), y, plane.area().getMaxX(), y));
+      }
+      boolean picked = pass.pass().name().equals(marked);
+      double size = picked ? PICKED : Math.min(MARK, 0.5 * spacing);
+      new PassMark(style, pass.pass().startBank(), pass.pass().used(), size)
+          .draw(graphics, plane.x(Quantity.DISCHARGE.in(units, pass.totalM3s())), y);
     }
   }
 
-  private void mark(
-      Graphics2D graphics, double x, double y, int direction, boolean used, boolean picked) {
-    double size = picked ? 1.35 * MARK : MARK;
-    Path2D mark = new Path2D.Double();
-    mark.moveTo(x - direction * size, y - size);
-    mark.lineTo(x + direction * size, y);
-    mark.lineTo(x - direction * size, y + size);
-    mark.closePath();
-    graphics.setPaint(used ? style.deep() : style.paper());
-    graphics.fill(mark);
-    graphics.setPaint(used ? style.deep() : style.quiet());
-    graphics.setStroke(style.line(0.9));
-    graphics.draw(mark);
-  }
-
+  /** Where rows stand closer than letters are high, only some have room for their name. */
   private void names(Graphics2D graphics, Plane plane, double left) {
-    // Where rows stand closer than letters are high, only some have room for their name.
-    int step = (int) Math.ceil(NAME / (plane.y(1) - plane.y(0)));
-    for (int p = 0; p < passes().size(); p += step) {
+    double lowest = Double.NEGATIVE_INFINITY;
+    double picked = place(plane);
+    for (int p = 0; p < passes().size(); p++) {
       String name = passes().get(p).pass().name();
-      boolean picked = name.equals(marked);
-      Label.left(picked ? style.title().deriveFont(7f) : style.tick(), style.ink())
-          .draw(graphics, name, left, plane.y(p) + 2.3);
+      double y = plane.y(p);
+      boolean own = name.equals(marked);
+      if (own || y - lowest >= NAME && Math.abs(y - picked) >= NAME) {
+        Label.left(own ? style.title().deriveFont(7f) : style.tick(), style.ink())
+            .draw(graphics, name, left, y + 2.3);
+        lowest = y;
+      }
     }
+  }
+
+  /** Where the marked pass stands (pt), infinitely far away when there is none. */
+  private double place(Plane plane) {
+    for (int p = 0; p < passes().size(); p++) {
+      if (passes().get(p).pass().name().equals(marked)) {
+        return plane.y(p);
+      }
+    }
+    return Double.POSITIVE_INFINITY;
   }
 
   private void key(Graphics2D graphics, Plane plane, double baseline) {
     Label label = Label.left(style.tick(), style.ink());
-    double left = plane.area().getMinX();
     double y = baseline - 2.2;
-    mark(graphics, left + 3, y, 1, true, false);
-    double x = named(graphics, label, "from the left bank", left + 9, baseline);
-    mark(graphics, x + 3, y, -1, true, false);
+    double x = plane.area().getMinX();
+    new PassMark(style, Bank.LEFT, true, MARK).draw(graphics, x + 3, y);
+    x = named(graphics, label, "from the left bank", x + 9, baseline);
+    new PassMark(style, Bank.RIGHT, true, MARK).draw(graphics, x + 3, y);
     x = named(graphics, label, "from the right bank", x + 9, baseline);
-    mark(graphics, x + 3, y, 1, false, false);
+    new PassMark(style, Bank.LEFT, false, MARK).draw(graphics, x + 3, y);
     x = named(graphics, label, "not used", x + 9, baseline);
     Rectangle2D band = new Rectangle2D.Double(x, baseline - 5.4, 12, 6);
     graphics.setPaint(style.wash());

@@ -10,6 +10,8 @@ import org.crossreach.report.chart.PassDots;
 /** The discharge of the pass, its zones, and its place among the others. */
 final class PassResultSection implements TransectSection {
 
+  private static final double TALLEST = 104;
+
   @Override
   public List<Block> blocks(Subject subject, PassDischarge pass) {
     return List.of(
@@ -29,8 +31,6 @@ final class PassResultSection implements TransectSection {
             List.of(1.0, 1.45, 1.5),
             16));
   }
-
-  private static final double TALLEST = 104;
 
   private static List<Block> number(Subject subject, PassDischarge pass) {
     PageStyle style = subject.style();
