@@ -1,6 +1,8 @@
 package org.crossreach.discharge;
 
 import java.util.List;
+import java.util.Optional;
+import org.crossreach.profile.ExponentFit;
 import org.crossreach.profile.Transports;
 import org.crossreach.section.Section;
 import org.crossreach.survey.Note;
@@ -12,6 +14,7 @@ import org.crossreach.survey.Pass;
  * @param pass what was recorded
  * @param columns discharge of every column, by the chosen method
  * @param exponent exponent of the power law that was used
+ * @param fit how the exponent was fitted; empty when it is fixed or could not be fitted
  * @param zones discharge by zone, by the chosen method (m³/s)
  * @param otherMethodTotalM3s total discharge by the method that was not chosen (m³/s)
  * @param leftEdge the left edge's estimate
@@ -23,6 +26,7 @@ public record PassDischarge(
     Pass pass,
     ColumnDischarge columns,
     double exponent,
+    Optional<ExponentFit> fit,
     ZoneDischarge zones,
     double otherMethodTotalM3s,
     EdgeEstimate leftEdge,

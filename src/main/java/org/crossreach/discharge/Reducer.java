@@ -2,6 +2,7 @@ package org.crossreach.discharge;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.stream.IntStream;
 import org.crossreach.profile.Transports;
 import org.crossreach.profile.Zone;
 import org.crossreach.section.Section;
@@ -60,16 +61,32 @@ public record Reducer(int threads) {
    * @param settings the choices of laws, exponent, method and edges
    */
   public Reduction integrate(LaidMeasurement laid, Settings settings) {
+    return integrate(laid, settings, Exponents.of(laid, settings.exponent(), threads));
+  }
+
+  /**
+   * Integrates laid passes with exponents that are known already.
+   *
+   * @param laid as for the other method
+   * @param settings as for the other method; its exponent is not looked at
+   * @param exponents the exponent of each laid pass
+   */
+  public Reduction integrate(LaidMeasurement laid, Settings settings, Exponents exponents) {
+    List<Integer> places = IntStream.range(0, laid.passes().size()).boxed().toList();
     List<PassDischarge> passes =
-        Workers.map(laid.passes(), threads, each -> discharge(each, settings));
+        Workers.map(
+            places,
+            threads,
+            place -> discharge(laid.passes().get(place), settings, exponents.passes().get(place)));
     return new Reduction(laid.measurement(), settings, passes, laid.notes());
   }
 
-  private static PassDischarge discharge(LaidPass laid, Settings settings) {
+  private static PassDischarge discharge(
+      LaidPass laid, Settings settings, Exponents.Chosen exponent) {
     Pass pass = laid.pass();
     Section section = laid.section();
-    double exponent = settings.exponent().value();
-    Transports transports = Transports.of(section, settings.top(), settings.bottom(), exponent);
+    Transports transports =
+        Transports.of(section, settings.top(), settings.bottom(), exponent.value());
     int wanted = settings.edgeEnsembles();
     boolean leftFirst = pass.startBank() == Bank.LEFT;
     EdgeEstimate left = EdgeEstimate.of(pass.leftEdge(), leftFirst, section, transports, wanted);
@@ -79,14 +96,15 @@ public record Reducer(int threads) {
     return new PassDischarge(
         pass,
         columns,
-        exponent,
+        exponent.value(),
+        exponent.fit(),
         zones(columns, left, right),
         zones(others, left, right).total(),
         left,
         right,
         PassGeometry.of(
             columns, distance(pass.leftEdge(), pass.rightEdge()), left.areaM2() + right.areaM2()),
-        notes(laid, transports, wanted));
+        notes(laid, exponent, transports, wanted));
   }
 
   private static double distance(Edge left, Edge right) {
@@ -110,9 +128,11 @@ public record Reducer(int threads) {
     };
   }
 
-  private static List<Note> notes(LaidPass laid, Transports transports, int edgeEnsembles) {
+  private static List<Note> notes(
+      LaidPass laid, Exponents.Chosen exponent, Transports transports, int edgeEnsembles) {
     List<Note> notes = new ArrayList<>(laid.pass().notes());
     notes.addAll(laid.section().pass().notes());
+    notes.addAll(exponent.notes());
     if (transports.ownCount() < edgeEnsembles) {
       notes.add(
           new Note(

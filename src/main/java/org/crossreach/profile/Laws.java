@@ -1,5 +1,7 @@
 package org.crossreach.profile;
 
+import org.crossreach.section.Column;
+import org.crossreach.section.Component;
 import org.crossreach.settings.BottomLaw;
 import org.crossreach.settings.TopLaw;
 
@@ -9,19 +11,29 @@ public final class Laws {
   private Laws() {}
 
   /** The law for the unmeasured water near the surface. */
-  public static UnmeasuredLaw of(TopLaw law) {
+  public static VelocityLaw of(TopLaw law) {
     return switch (law) {
-      case POWER -> new PowerTop();
-      case CONSTANT -> new ConstantTop();
-      case THREE_POINT -> new ThreePointTop();
+      case POWER -> new PowerLaw();
+      case CONSTANT -> new ConstantLaw();
+      case THREE_POINT -> new ThreePointLaw();
     };
   }
 
   /** The law for the unmeasured water near the bed. */
-  public static UnmeasuredLaw of(BottomLaw law) {
+  public static VelocityLaw of(BottomLaw law) {
     return switch (law) {
-      case POWER -> new PowerBottom();
-      case NO_SLIP -> new NoSlipBottom();
+      case POWER -> new PowerLaw();
+      case NO_SLIP -> new NoSlipLaw();
     };
+  }
+
+  /** Transport between the highest usable cell and the surface, per unit width (m²/s). */
+  static double top(VelocityLaw law, Column column, Component component, double exponent) {
+    return law.transport(column, component, exponent, column.upperM(0), column.depthM());
+  }
+
+  /** Transport between the bed and the lowest usable cell, per unit width (m²/s). */
+  static double bottom(VelocityLaw law, Column column, Component component, double exponent) {
+    return law.transport(column, component, exponent, 0, column.lowerM(column.size() - 1));
   }
 }

@@ -4,41 +4,51 @@ import org.crossreach.section.Column;
 import org.crossreach.section.Component;
 
 /**
- * The power law of velocity above the bed, {@code u(z) = a z^m}, fitted so that it carries the same
- * transport as the cells: {@code a = (m + 1) S / D} with {@code S} the sum of velocity times height
- * over the cells and {@code D} the sum of {@code upper^(m+1) - lower^(m+1)}.
+ * The power law of velocity above the bed, {@code u(z) = a z^m}, through all usable cells, fitted
+ * so that it carries the same transport as they: {@code a = (m + 1) S / D} with {@code S} the sum
+ * of velocity times height over the cells and {@code D} the sum of {@code upper^(m+1) -
+ * lower^(m+1)}.
  *
  * <p>Source: Simpson and Oltmann 1993, USGS Water-Supply Paper 2395.
  */
-final class PowerLaw {
+final class PowerLaw implements VelocityLaw {
 
-  private PowerLaw() {}
+  @Override
+  public double transport(
+      Column column, Component component, double exponent, double fromM, double toM) {
+    return amplitude(column, component, 0, exponent) * between(fromM, toM, exponent);
+  }
+
+  /** Difference of two heights to the power m + 1. */
+  static double between(double fromM, double toM, double exponent) {
+    return raised(toM, exponent) - raised(fromM, exponent);
+  }
 
   /**
-   * {@code a / (m + 1)} (m/s over m^m): multiplied with a difference of heights to the power m + 1
-   * it gives a transport (m²/s).
+   * {@code a / (m + 1)} (m/s over m^m): multiplied with {@link #between} it gives a transport
+   * (m²/s).
    *
-   * @param from first cell of the column used
-   * @param to one past the last cell used
+   * @param from first cell of the column used; all below it are used too
    */
-  static double amplitude(Column column, Component component, int from, int to, double exponent) {
+  static double amplitude(Column column, Component component, int from, double exponent) {
+    int size = column.size();
     double sum = 0;
     double divisor = 0;
     double upper = Double.NaN;
-    for (int j = from; j < to; j++) {
+    for (int j = from; j < size; j++) {
       sum += column.velocityMps(component, j) * column.heightM(j);
+      // Within a run of joined cells the powers cancel: only its ends count.
       if (j == from || !column.joined(j - 1)) {
         upper = raised(column.upperM(j), exponent);
       }
-      if (j == to - 1 || !column.joined(j)) {
+      if (j == size - 1 || !column.joined(j)) {
         divisor += upper - raised(column.lowerM(j), exponent);
       }
     }
     return sum / divisor;
   }
 
-  /** Height to the power m + 1. */
-  static double raised(double height, double exponent) {
+  private static double raised(double height, double exponent) {
     return Math.pow(height, exponent + 1);
   }
 }

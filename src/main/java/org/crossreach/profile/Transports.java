@@ -50,8 +50,7 @@ public final class Transports {
     }
   }
 
-  private void integrate(
-      Section section, UnmeasuredLaw top, UnmeasuredLaw bottom, double exponent) {
+  private void integrate(Section section, VelocityLaw top, VelocityLaw bottom, double exponent) {
     VelocityRow row = section.newRow();
     Column column = section.newColumn();
     for (int i = 0; i < own.length; i++) {
@@ -63,10 +62,10 @@ public final class Transports {
       for (Component component : COMPONENTS) {
         double throughGaps = MeasuredZone.throughGaps(column, component);
         gaps[component.ordinal()][i] = throughGaps;
-        values[index(Zone.TOP, component)][i] = top.transport(column, component, exponent);
+        values[index(Zone.TOP, component)][i] = Laws.top(top, column, component, exponent);
         values[index(Zone.MEASURED, component)][i] =
             MeasuredZone.throughCells(column, component) + throughGaps;
-        values[index(Zone.BOTTOM, component)][i] = bottom.transport(column, component, exponent);
+        values[index(Zone.BOTTOM, component)][i] = Laws.bottom(bottom, column, component, exponent);
       }
     }
   }

@@ -10,20 +10,20 @@ package org.crossreach.screen;
  * @param sigma standard deviation that Gaussian numbers with this median absolute deviation have,
  *     in the unit of the numbers; NaN of no numbers
  */
-record RobustScale(double median, double sigma) {
+public record RobustScale(double median, double sigma) {
 
   /**
    * Standard deviation over median absolute deviation of Gaussian numbers: one over the normal
    * quantile of 0.75.
    */
-  static final double SIGMA_PER_MAD = 1.482602218505602;
+  public static final double SIGMA_PER_MAD = 1.482602218505602;
 
   /**
    * Scale of the first numbers of an array.
    *
    * @param values overwritten by the call; none of the first {@code size} is NaN
    */
-  static RobustScale of(double[] values, int size) {
+  public static RobustScale of(double[] values, int size) {
     double median = Median.of(values, size);
     for (int i = 0; i < size; i++) {
       values[i] = Math.abs(values[i] - median);

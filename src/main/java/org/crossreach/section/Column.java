@@ -74,4 +74,21 @@ public final class Column {
   public boolean joined(int j) {
     return cell[j] + 1 == cell[j + 1];
   }
+
+  /**
+   * Takes over some cells of another column, with its depth.
+   *
+   * @param source the other column
+   * @param from first cell taken
+   * @param to one past the last cell taken
+   */
+  public void takePart(Column source, int from, int to) {
+    size = to - from;
+    depthM = source.depthM;
+    System.arraycopy(source.cell, from, cell, 0, size);
+    System.arraycopy(source.upperM, from, upperM, 0, size);
+    System.arraycopy(source.lowerM, from, lowerM, 0, size);
+    System.arraycopy(source.normalMps, from, normalMps, 0, size);
+    System.arraycopy(source.alongMps, from, alongMps, 0, size);
+  }
 }

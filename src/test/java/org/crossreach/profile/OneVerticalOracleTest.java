@@ -69,15 +69,15 @@ class OneVerticalOracleTest {
     assertEquals(z2, column.upperM(0), 1e-12);
     assertEquals(z1, column.lowerM(cells - 1), 1e-12);
     double measured = MeasuredZone.throughCells(column, Component.NORMAL);
-    double powerTop = new PowerTop().transport(column, Component.NORMAL, m);
-    double powerBottom = new PowerBottom().transport(column, Component.NORMAL, m);
+    double powerTop = Laws.top(new PowerLaw(), column, Component.NORMAL, m);
+    double powerBottom = Laws.bottom(new PowerLaw(), column, Component.NORMAL, m);
     assertEquals(throughCells, measured, LAST_DIGIT);
     assertEquals(top, powerTop, LAST_DIGIT);
     assertEquals(bottom, powerBottom, LAST_DIGIT);
     assertEquals(total, measured + powerTop + powerBottom, LAST_DIGIT);
-    assertEquals(constantTop, new ConstantTop().transport(column, Component.NORMAL, m), LAST_DIGIT);
+    assertEquals(constantTop, Laws.top(new ConstantLaw(), column, Component.NORMAL, m), LAST_DIGIT);
     assertEquals(
-        threePointTop, new ThreePointTop().transport(column, Component.NORMAL, m), LAST_DIGIT);
+        threePointTop, Laws.top(new ThreePointLaw(), column, Component.NORMAL, m), LAST_DIGIT);
   }
 
   @ParameterizedTest
@@ -85,7 +85,7 @@ class OneVerticalOracleTest {
   void noSlipThroughTheLowestFifthReturnsTheBottomOfAPowerLaw(boolean exactMeans, double bottom) {
     Column column = column(5, .25, .25, .25, 20, 1 / 6.0, 1, exactMeans);
     assertEquals(
-        bottom, new NoSlipBottom().transport(column, Component.NORMAL, 1 / 6.0), LAST_DIGIT);
+        bottom, Laws.bottom(new NoSlipLaw(), column, Component.NORMAL, 1 / 6.0), LAST_DIGIT);
   }
 
   /** The first usable column of a boat that crosses eastward over water that flows north. */

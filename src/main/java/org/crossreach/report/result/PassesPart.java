@@ -40,7 +40,11 @@ final class PassesPart implements ResultPart {
     json.number("mean_velocity_mps", each.meanVelocityMps());
     json.number("mean_depth_m", each.geometry().meanDepthM());
     json.number("exponent", each.exponent());
-    json.nothing("exponent_ci95");
+    if (each.fit().isPresent()) {
+      json.numbers("exponent_ci95", each.fit().get().low95(), each.fit().get().high95());
+    } else {
+      json.nothing("exponent_ci95");
+    }
     json.object(
         "by_reference_m3s", () -> json.number(BoatVelocity.BOTTOM_TRACK.key(), each.totalM3s()));
     json.nothing("uncorrected_total_m3s");

@@ -4,22 +4,23 @@ import org.crossreach.section.Column;
 import org.crossreach.section.Component;
 
 /**
- * The straight line through the three highest usable cells (least squares), carried to the surface;
- * for profiles that wind has slowed or driven. A column with fewer than {@value #FEWEST_CELLS}
- * usable cells takes the constant law instead.
+ * The straight line through the three highest usable cells (least squares), for profiles that wind
+ * has slowed or driven. A column with fewer than {@value #FEWEST_CELLS} usable cells takes the
+ * constant law instead.
  *
  * <p>Source: Mueller and Wagner 2009, USGS Techniques and Methods 3-A22 (from memory).
  */
-final class ThreePointTop implements UnmeasuredLaw {
+final class ThreePointLaw implements VelocityLaw {
 
   static final int FEWEST_CELLS = 6;
 
-  private final UnmeasuredLaw fallback = new ConstantTop();
+  private final VelocityLaw fallback = new ConstantLaw();
 
   @Override
-  public double transport(Column column, Component component, double exponent) {
+  public double transport(
+      Column column, Component component, double exponent, double fromM, double toM) {
     if (column.size() < FEWEST_CELLS) {
-      return fallback.transport(column, component, exponent);
+      return fallback.transport(column, component, exponent, fromM, toM);
     }
     double meanHeight = (column.centreM(0) + column.centreM(1) + column.centreM(2)) / 3;
     double mean = 0;
@@ -33,8 +34,6 @@ final class ThreePointTop implements UnmeasuredLaw {
       spread += height * height;
     }
     slope /= spread;
-    double thickness = column.depthM() - column.upperM(0);
-    double middle = 0.5 * (column.depthM() + column.upperM(0));
-    return thickness * (mean + slope * (middle - meanHeight));
+    return (toM - fromM) * (mean + slope * (0.5 * (fromM + toM) - meanHeight));
   }
 }
