@@ -2,6 +2,8 @@ package org.crossreach.ingest;
 
 import java.io.IOException;
 import java.nio.file.Files;
+import java.nio.file.NoSuchFileException;
+import java.nio.file.NotDirectoryException;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
@@ -45,13 +47,18 @@ public final class MeasurementFolder {
    * @param folder its folder
    * @throws UnusableInput with every problem of every file, in the order: {@code measurement.json},
    *     {@code settings.json}, the CSV files in the order in which they are named
-   * @throws IOException when a file cannot be read from its disk
+   * @throws IOException when there is no such folder, or a file cannot be read from its disk
    */
   public static Measurement read(Path folder) throws UnusableInput, IOException {
     return new MeasurementFolder(folder).read();
   }
 
   private Measurement read() throws UnusableInput, IOException {
+    if (!Files.isDirectory(folder)) {
+      throw Files.exists(folder)
+          ? new NotDirectoryException(folder.toString())
+          : new NoSuchFileException(folder.toString());
+    }
     MeasurementFile file = readMeasurementFile();
     readSettings(file);
     Map<String, Path> files = findFiles(file);
