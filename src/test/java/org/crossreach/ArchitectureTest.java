@@ -35,6 +35,7 @@ class ArchitectureTest {
           "profile",
           "discharge",
           "agreement",
+          "evidence",
           "report",
           "archive",
           "cli");

@@ -30,7 +30,8 @@ import picocli.CommandLine.Spec;
 public final class Crossreach implements Runnable {
 
   /** Every command: a class named as the command is typed, with a capital first letter. */
-  static final List<Class<?>> COMMANDS = List.of(Reduce.class, Check.class, Simulate.class);
+  static final List<Class<?>> COMMANDS =
+      List.of(Reduce.class, Compare.class, Check.class, Simulate.class);
 
   @Option(
       names = "--version",

@@ -17,7 +17,7 @@ import java.util.List;
  * @param columns the columns in order
  * @param <R> what a row is made of
  */
-record CsvTable<R>(List<Column<R>> columns) {
+public record CsvTable<R>(List<Column<R>> columns) {
 
   /**
    * A column.
@@ -25,20 +25,20 @@ record CsvTable<R>(List<Column<R>> columns) {
    * @param name its name, with the unit
    * @param text its text in a row
    */
-  record Column<R>(String name, Field<R> text) {}
+  public record Column<R>(String name, Field<R> text) {}
 
   /** The text of one field. */
-  interface Field<R> {
+  public interface Field<R> {
     String of(R row);
   }
 
   /** A number of one field. */
-  interface Figure<R> {
+  public interface Figure<R> {
     double of(R row);
   }
 
   /** A column of numbers. */
-  static <R> Column<R> number(String name, Figure<R> figure) {
+  public static <R> Column<R> number(String name, Figure<R> figure) {
     return new Column<>(name, row -> text(figure.of(row)));
   }
 
@@ -53,7 +53,7 @@ record CsvTable<R>(List<Column<R>> columns) {
    * @param rows its rows
    * @param target receives UTF-8; it is left open
    */
-  void write(Iterable<R> rows, OutputStream target) throws IOException {
+  public void write(Iterable<R> rows, OutputStream target) throws IOException {
     Writer writer = new OutputStreamWriter(target, StandardCharsets.UTF_8);
     CsvWriter csv = CsvWriter.builder().lineDelimiter(LineDelimiter.LF).build(writer);
     String[] fields = new String[columns.size()];

@@ -3,13 +3,11 @@ package org.crossreach.report;
 import java.util.ArrayList;
 import java.util.List;
 
-/**
- * A table of text in columns: the first ones to the left, the others to the right, two blanks
- * between them.
- */
-final class TextTable {
+/** A table of text in columns: the first ones to the left, the others to the right. */
+public final class TextTable {
 
   private final int leftAligned;
+  private final String gap;
   private final List<String[]> rows = new ArrayList<>();
 
   /**
@@ -17,26 +15,37 @@ final class TextTable {
    *
    * @param leftAligned number of columns, from the first, that are aligned to the left
    */
-  TextTable(int leftAligned) {
+  public TextTable(int leftAligned) {
+    this(leftAligned, 2);
+  }
+
+  /**
+   * Starts an empty table with another gap.
+   *
+   * @param leftAligned number of columns, from the first, that are aligned to the left
+   * @param gap blanks between columns
+   */
+  public TextTable(int leftAligned, int gap) {
     this.leftAligned = leftAligned;
+    this.gap = " ".repeat(gap);
   }
 
   /** Appends a row; every row has the same number of cells. */
-  void row(String... cells) {
+  public void row(String... cells) {
     rows.add(cells);
   }
 
   /** Appends a line across the table. */
-  void rule() {
+  public void rule() {
     rows.add(null);
   }
 
   /** The lines of the table, without blanks at their ends. */
-  List<String> lines() {
+  public List<String> lines() {
     int[] widths = widths();
-    int whole = -2;
+    int whole = -gap.length();
     for (int width : widths) {
-      whole += width + 2;
+      whole += width + gap.length();
     }
     List<String> lines = new ArrayList<>();
     for (String[] row : rows) {
@@ -62,7 +71,7 @@ final class TextTable {
     StringBuilder line = new StringBuilder();
     for (int c = 0; c < row.length; c++) {
       String padding = " ".repeat(widths[c] - row[c].codePointCount(0, row[c].length()));
-      line.append(c == 0 ? "" : "  ");
+      line.append(c == 0 ? "" : gap);
       line.append(c < leftAligned ? row[c] + padding : padding + row[c]);
     }
     return line.toString().stripTrailing();

@@ -4,7 +4,7 @@ import java.util.ArrayList;
 import java.util.List;
 
 /** Breaks prose into lines. */
-final class TextWrap {
+public final class TextWrap {
 
   private TextWrap() {}
 
@@ -15,7 +15,7 @@ final class TextWrap {
    * @param width most characters in a line; a longer word stands alone in its line
    * @param indent what every line but the first begins with
    */
-  static List<String> lines(String text, int width, String indent) {
+  public static List<String> lines(String text, int width, String indent) {
     List<String> lines = new ArrayList<>();
     StringBuilder line = new StringBuilder();
     for (String word : text.split(" ", -1)) {

@@ -5,7 +5,7 @@ import org.crossreach.simulate.RecipeFile;
 import org.crossreach.survey.UnusableInput;
 
 /** Virtual rivers for whole-way tests, written as recipes with some members replaced. */
-final class Rivers {
+public final class Rivers {
 
   private static final String RECIPE =
       """
@@ -52,38 +52,38 @@ final class Rivers {
   private String instrument = "";
   private double draftM = 0.25;
 
-  Rivers vertical(String json) {
+  public Rivers vertical(String json) {
     vertical = json;
     return this;
   }
 
   /** A canal of 100 m by 5 m with vertical walls, in place of the natural channel. */
-  Rivers canal() {
+  public Rivers canal() {
     channel = CANAL;
     return this;
   }
 
-  Rivers skew(double deg) {
+  public Rivers skew(double deg) {
     skewDeg = deg;
     return this;
   }
 
-  Rivers wobble(double metres) {
+  public Rivers wobble(double metres) {
     wobbleM = metres;
     return this;
   }
 
-  Rivers passes(int count) {
+  public Rivers passes(int count) {
     passes = count;
     return this;
   }
 
-  Rivers noise(String json) {
+  public Rivers noise(String json) {
     noise = json;
     return this;
   }
 
-  Rivers faults(String json) {
+  public Rivers faults(String json) {
     faults = json;
     return this;
   }
@@ -113,7 +113,7 @@ final class Rivers {
     return this;
   }
 
-  Recipe recipe() throws UnusableInput {
+  public Recipe recipe() throws UnusableInput {
     return RecipeFile.parse(
         RECIPE
             .replace("%CHANNEL%", channel)
