@@ -40,12 +40,7 @@ public record Verdict(Prediction chosen, Prediction best, Finding finding) {
     if (chosen.blocks().size() < 4 || !Double.isFinite(chosen.score())) {
       return new Verdict(chosen, chosen, Finding.NO_EVIDENCE);
     }
-    Prediction best = chosen;
-    for (Prediction each : all) {
-      if (each.score() < best.score() - CHANCE_PCT) {
-        best = each;
-      }
-    }
+    Prediction best = best(chosen, all);
     double gain = Math.abs(chosen.biasPct()) - Math.abs(best.biasPct());
     Finding finding =
         best == chosen || best.candidate().same(chosen.candidate()) || gain < WORTHWHILE_PCT
@@ -54,6 +49,27 @@ public record Verdict(Prediction chosen, Prediction best, Finding finding) {
                 ? Finding.FAVOURS_ANOTHER
                 : Finding.CANNOT_TELL;
     return new Verdict(chosen, best, finding);
+  }
+
+  /**
+   * The law with the smallest score; of those whose lead over each other may be chance the one that
+   * amplifies noise least.
+   */
+  private static Prediction best(Prediction chosen, List<Prediction> all) {
+    Prediction least = chosen;
+    for (Prediction each : all) {
+      if (each.score() < least.score() - CHANCE_PCT) {
+        least = each;
+      }
+    }
+    Prediction best = least;
+    for (Prediction each : all) {
+      if (each.standardErrorPct() < best.standardErrorPct() - CHANCE_PCT
+          && !(least.leadOver(each) > STANDARD_ERRORS)) {
+        best = each;
+      }
+    }
+    return best;
   }
 
   /** The finding as one sentence. */
