@@ -1,5 +1,5 @@
 /**
- * How values are written as JSON.
+ * How values and times are written.
  *
  * <p>Comes in: texts, numbers and lists. Goes out: UTF-8 that reads back as the same values on
  * every machine. Start at {@link org.crossreach.notation.JsonText}. Every package may use this one;

@@ -9,6 +9,7 @@ import java.util.Locale;
 import org.crossreach.agreement.Result;
 import org.crossreach.agreement.Spread;
 import org.crossreach.discharge.PassDischarge;
+import org.crossreach.notation.TimeText;
 
 /** The passes of a measurement as a table: one row for each pass, used or not. */
 public final class PassesCsv {
@@ -32,7 +33,7 @@ public final class PassesCsv {
         new CsvTable.Column<>(
             "start_bank", each -> each.pass().startBank().name().toLowerCase(Locale.ROOT)),
         new CsvTable.Column<>("used", each -> Boolean.toString(each.pass().used())),
-        new CsvTable.Column<>("start_time", each -> each.pass().ensembles().start().toString()),
+        new CsvTable.Column<>("start_time", each -> TimeText.of(each.pass().ensembles().start())),
         new CsvTable.Column<>(
             "ensembles", each -> Integer.toString(each.pass().ensembles().size())),
         number("duration_s", each -> each.geometry().durationS()),

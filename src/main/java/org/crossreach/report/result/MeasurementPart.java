@@ -3,6 +3,7 @@ package org.crossreach.report.result;
 import java.io.IOException;
 import org.crossreach.agreement.Result;
 import org.crossreach.notation.JsonText;
+import org.crossreach.notation.TimeText;
 import org.crossreach.survey.Instrument;
 import org.crossreach.survey.Measurement;
 import org.crossreach.survey.Rating;
@@ -59,7 +60,7 @@ final class MeasurementPart implements ResultPart {
               "readings",
               stage.readings(),
               (Stage.Reading reading) -> {
-                json.text("time", reading.time().toString());
+                json.text("time", TimeText.of(reading.time()));
                 json.number("stage_m", reading.stageM());
               });
         });

@@ -6,6 +6,7 @@ import org.crossreach.agreement.Result;
 import org.crossreach.agreement.Summary;
 import org.crossreach.discharge.PassDischarge;
 import org.crossreach.notation.JsonText;
+import org.crossreach.notation.TimeText;
 import org.crossreach.settings.BoatVelocity;
 import org.crossreach.survey.Pass;
 
@@ -26,7 +27,7 @@ final class PassesPart implements ResultPart {
     json.flag("used", pass.used());
     json.text("note", pass.note());
     json.whole("ensembles", pass.ensembles().size());
-    json.text("start_time", pass.ensembles().start().toString());
+    json.text("start_time", TimeText.of(pass.ensembles().start()));
     json.number("duration_s", each.geometry().durationS());
     json.object(
         "discharge_m3s",
