@@ -91,6 +91,11 @@ final class ChoiceOptions {
     chosen.putAll(choices);
   }
 
+  /** The options' choices as JSON with the keys of {@code settings.json}; empty for none. */
+  String asJson() {
+    return chosen.isEmpty() ? "" : NestedJson.of(chosen);
+  }
+
   /**
    * The settings with the options' choices in place of their own.
    *

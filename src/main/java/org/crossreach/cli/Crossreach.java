@@ -31,7 +31,7 @@ public final class Crossreach implements Runnable {
 
   /** Every command: a class named as the command is typed, with a capital first letter. */
   static final List<Class<?>> COMMANDS =
-      List.of(Reduce.class, Compare.class, Check.class, Simulate.class);
+      List.of(Reduce.class, Compare.class, Archive.class, Check.class, Simulate.class);
 
   @Option(
       names = "--version",

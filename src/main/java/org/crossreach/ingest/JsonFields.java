@@ -1,6 +1,7 @@
 package org.crossreach.ingest;
 
 import java.util.ArrayList;
+import java.util.Collections;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
@@ -70,6 +71,12 @@ public final class JsonFields {
   public int line(String key) {
     JsonNode node = members.get(key);
     return node == null ? line : node.line();
+  }
+
+  /** All members as they stand in the file; all of them count as known. */
+  public Map<String, JsonNode> members() {
+    known.addAll(members.keySet());
+    return Collections.unmodifiableMap(members);
   }
 
   /** Whether a member is there and not {@code null}. */

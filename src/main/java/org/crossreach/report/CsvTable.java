@@ -43,7 +43,7 @@ public record CsvTable<R>(List<Column<R>> columns) {
   }
 
   /** The fewest digits that tell a double from its neighbours, empty when it is not finite. */
-  static String text(double value) {
+  public static String text(double value) {
     return Double.isFinite(value) ? NumberOutput.toString(value + 0.0, true) : "";
   }
 

@@ -21,14 +21,14 @@ public enum FileKind implements Choice {
   /** The whole result. */
   JSON("json") {
     @Override
-    List<OutputFile> files(Result result, Units units) {
+    public List<OutputFile> files(Result result, Units units) {
       return List.of(new OutputFile(OutputFolder.MARK, target -> ResultJson.write(result, target)));
     }
   },
   /** The passes as one table, and the ensembles of each pass as another. */
   CSV("csv") {
     @Override
-    List<OutputFile> files(Result result, Units units) {
+    public List<OutputFile> files(Result result, Units units) {
       List<OutputFile> files = new ArrayList<>();
       files.add(new OutputFile("passes.csv", target -> PassesCsv.write(result, target)));
       for (PassDischarge pass : result.reduction().passes()) {
@@ -42,7 +42,7 @@ public enum FileKind implements Choice {
   /** Pages to keep: one PDF for each pass and one for the measurement. */
   PDF("pdf") {
     @Override
-    List<OutputFile> files(Result result, Units units) {
+    public List<OutputFile> files(Result result, Units units) {
       List<OutputFile> files = new ArrayList<>();
       PdfOptions options = PdfOptions.defaults().withUnits(units);
       files.add(
@@ -68,14 +68,14 @@ public enum FileKind implements Choice {
   /** Every picture as pixels. */
   PNG("png") {
     @Override
-    List<OutputFile> files(Result result, Units units) {
+    public List<OutputFile> files(Result result, Units units) {
       return pictures(result, units, "png", PictureFile::png);
     }
   },
   /** Every picture as lines. */
   SVG("svg") {
     @Override
-    List<OutputFile> files(Result result, Units units) {
+    public List<OutputFile> files(Result result, Units units) {
       return pictures(result, units, "svg", PictureFile::svg);
     }
   };
@@ -113,10 +113,10 @@ public enum FileKind implements Choice {
    * @param name its name
    * @param product what it holds
    */
-  record OutputFile(String name, OutputFolder.Product product) {}
+  public record OutputFile(String name, OutputFolder.Product product) {}
 
   /** The files of this kind for a result; those for people are in the reader's units. */
-  abstract List<OutputFile> files(Result result, Units units);
+  public abstract List<OutputFile> files(Result result, Units units);
 
   @Override
   public String key() {
