@@ -12,6 +12,9 @@ final class AlignedRows {
   private static final int REACH = RowWindow.REACH;
   private static final int ROWS = 2 * REACH + 1;
 
+  /** More than half of the rows before and after. */
+  private static final int MAJORITY = REACH + 1;
+
   /** The rows before and after the middle one. */
   private static final int[] NEAREST_FIRST = {2, 4, 1, 5, 0, 6};
 
@@ -72,36 +75,40 @@ final class AlignedRows {
   }
 
   /**
-   * Whether several cells of the same depth before and after lie so near to one of the middle
-   * ensemble, in each component both relative to the middle of their ensembles and as they are,
-   * that any median of which they are more than half does, too. This settles nearly every cell
-   * without a median.
+   * Finds the used cells of the middle ensemble that do not agree with most cells of the same depth
+   * before and after: those that have fewer than four such cells near in each component. More than
+   * half of six are four, so that the median of all six is near to a cell that is not found.
    *
-   * @param enough how many must
-   * @param relative how near (m/s) relative to the middle of their ensembles
-   * @param asTheyAre how near (m/s) as they are
+   * @param near how near (m/s), in the way chosen by {@link #relative}
+   * @param reasons reasons of the middle ensemble's cells
+   * @param found receives the cells
+   * @return how many there are
    */
-  boolean mostAgree(int cell, int enough, double relative, double asTheyAre) {
-    double e = east[REACH][cell];
-    double n = north[REACH][cell];
-    double toMiddleEast = e - middleEast[REACH];
-    double toMiddleNorth = n - middleNorth[REACH];
-    int near = 0;
-    for (int row : NEAREST_FIRST) {
-      if (east[row] == null) {
+  int disagreeing(double near, byte[] reasons, int[] found) {
+    double[] ownEast = east[REACH];
+    double[] ownNorth = north[REACH];
+    int size = 0;
+    for (int k = 0; k < reasons.length; k++) {
+      if (reasons[k] != 0) {
         continue;
       }
-      double otherEast = east[row][cell];
-      double otherNorth = north[row][cell];
-      if (Math.abs(otherEast - e) <= asTheyAre
-          && Math.abs(otherNorth - n) <= asTheyAre
-          && Math.abs(otherEast - middleEast[row] - toMiddleEast) <= relative
-          && Math.abs(otherNorth - middleNorth[row] - toMiddleNorth) <= relative
-          && ++near == enough) {
-        return true;
+      double e = ownEast[k] - offsetEast[REACH];
+      double n = ownNorth[k] - offsetNorth[REACH];
+      int agreeing = 0;
+      for (int row : NEAREST_FIRST) {
+        double[] otherEast = east[row];
+        if (otherEast != null
+            && Math.abs(otherEast[k] - offsetEast[row] - e) <= near
+            && Math.abs(north[row][k] - offsetNorth[row] - n) <= near
+            && ++agreeing == MAJORITY) {
+          break;
+        }
+      }
+      if (agreeing < MAJORITY) {
+        found[size++] = k;
       }
     }
-    return false;
+    return size;
   }
 
   /** Chooses how velocities stand: relative to the middle of their ensemble, or as they are. */

@@ -137,7 +137,7 @@ final class BeamDepths {
     Sample others = new Sample();
     for (double[] beam : depthM) {
       own.addScatter(beam, true);
-      for (int i = 0; i < middle.length; i++) {
+      for (int i = 0; i < middle.length; i += Sample.stride(middle.length, 1)) {
         others.add((beam[i] - middle[i]) / middle[i]);
       }
     }

@@ -46,22 +46,24 @@ final class CellJudge {
       Arrays.fill(reasons, 0, own, Reason.EXCLUDED.code());
       return;
     }
-    double boatUp = limits.verticalOverBed() ? facts.boatUpMps()[ensemble] : 0;
     double size = facts.cellSizeM(ensemble);
+    // All depths are measured from the transducer face: the draft cancels.
     double top = facts.firstCellM(ensemble) - 0.5 * size;
     double lowest = facts.lowestM()[ensemble];
     double highest = facts.screening().leaveOutTopM() - facts.draftM();
-    for (int k = 0; k < own; k++) {
-      Reason reason = Reason.NONE;
-      // All depths are measured from the transducer face: the draft cancels.
-      if (!(top + (k + 1) * size <= lowest)) {
-        reason = Reason.SIDE_LOBE;
-      } else if (top + k * size < highest) {
-        reason = Reason.NEAR_SURFACE;
-      } else {
-        reason = bySamples(ensemble, row, k, boatUp);
-      }
-      reasons[k] = reason.code();
+    int above = 0;
+    while (above < own && top + (above + 1) * size <= lowest) {
+      above++;
+    }
+    Arrays.fill(reasons, above, own, Reason.SIDE_LOBE.code());
+    int below = 0;
+    while (below < above && top + below * size < highest) {
+      below++;
+    }
+    Arrays.fill(reasons, 0, below, Reason.NEAR_SURFACE.code());
+    double boatUp = limits.verticalOverBed() ? facts.boatUpMps()[ensemble] : 0;
+    for (int k = below; k < above; k++) {
+      reasons[k] = bySamples(ensemble, row, k, boatUp).code();
     }
   }
 

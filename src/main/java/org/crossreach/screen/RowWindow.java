@@ -18,8 +18,10 @@ final class RowWindow {
 
   private final CellFacts facts;
   private final CellJudge judge;
+  private final boolean middles;
   private final VelocityRow row;
   private final double[] scratch;
+  private final int[] usedCells;
   private final int[] owner = new int[SLOTS];
   private final double[][] east = new double[SLOTS][];
   private final double[][] north = new double[SLOTS][];
@@ -29,12 +31,19 @@ final class RowWindow {
   private final double[] middleNorth = new double[SLOTS];
   private final int[] used = new int[SLOTS];
 
-  RowWindow(CellFacts facts, CellJudge judge) {
+  /**
+   * Opens the window.
+   *
+   * @param middles whether the middles of ensembles are wanted
+   */
+  RowWindow(CellFacts facts, CellJudge judge, boolean middles) {
+    this.middles = middles;
     this.facts = facts;
     this.judge = judge;
     int cells = facts.cells();
     row = new VelocityRow(cells);
     scratch = new double[cells];
+    usedCells = new int[cells];
     for (int s = 0; s < SLOTS; s++) {
       owner[s] = -1;
       east[s] = new double[cells];
@@ -42,6 +51,11 @@ final class RowWindow {
       reasons[s] = new byte[cells];
       threeBeam[s] = new boolean[cells];
     }
+  }
+
+  /** Whether the middles of ensembles are measured. */
+  boolean hasMiddles() {
+    return middles;
   }
 
   /** Loads an ensemble and its neighbours, those that are not there already. */
@@ -67,40 +81,24 @@ final class RowWindow {
       east[slot][k] = accepted ? row.east[k] + boatEast : Double.NaN;
       north[slot][k] = accepted ? row.north[k] + boatNorth : Double.NaN;
       threeBeam[slot][k] = accepted && Double.isNaN(row.error[k]);
-      count += accepted ? 1 : 0;
+      if (accepted) {
+        usedCells[count++] = k;
+      }
     }
     used[slot] = count;
-    middleEast[slot] = median(east[slot], count);
-    middleNorth[slot] = median(north[slot], count);
+    if (middles) {
+      middleEast[slot] = median(east[slot], count);
+      middleNorth[slot] = median(north[slot], count);
+    }
   }
 
-  private double median(double[] values, int present) {
-    int stride = Math.max(1, (present + ENOUGH_FOR_MIDDLE - 1) / ENOUGH_FOR_MIDDLE);
-    int seen = 0;
-    int count = 0;
-    for (double value : values) {
-      if (!Double.isNaN(value) && seen++ % stride == 0) {
-        scratch[count++] = value;
-      }
+  private double median(double[] values, int count) {
+    int stride = Math.max(1, (count + ENOUGH_FOR_MIDDLE - 1) / ENOUGH_FOR_MIDDLE);
+    int size = 0;
+    for (int j = 0; j < count; j += stride) {
+      scratch[size++] = values[usedCells[j]];
     }
-    return Median.of(scratch, count);
-  }
-
-  /**
-   * Median of a component of a loaded ensemble over all cells that are still used (m/s), NaN when
-   * there is none.
-   *
-   * @param values the ensemble's {@link #east} or {@link #north}
-   * @param why reasons of its cells
-   */
-  double medianOfUsed(double[] values, byte[] why) {
-    int count = 0;
-    for (int k = 0; k < why.length; k++) {
-      if (why[k] == 0) {
-        scratch[count++] = values[k];
-      }
-    }
-    return Median.of(scratch, count);
+    return Median.of(scratch, size);
   }
 
   /** Eastward velocities (m/s) of a loaded ensemble, NaN where a cell is not used. */

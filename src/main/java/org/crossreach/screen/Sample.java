@@ -37,21 +37,26 @@ final class Sample {
   /**
    * Adds how a column scatters about its own course: its values' departures from the mean of their
    * two neighbours, divided by the square root of 1.5, by which these scatter more than independent
-   * values do. Missing values are passed over.
+   * values do. Missing values are passed over; of a long column every few are enough.
    *
    * @param values the column, NaN where missing
    * @param asShare whether departures are taken as a share of that mean
    */
   void addScatter(double[] values, boolean asShare) {
+    int stride = stride(values.length, 1);
+    int seen = 0;
     double before = Double.NaN;
     double here = Double.NaN;
     for (double after : values) {
-      if (!Double.isNaN(after)) {
+      if (Double.isNaN(after)) {
+        continue;
+      }
+      if (seen++ % stride == 0) {
         double mean = 0.5 * (before + after);
         add((here - mean) / (asShare ? mean : 1) / SCATTER_OF_DEPARTURE);
-        before = here;
-        here = after;
       }
+      before = here;
+      here = after;
     }
   }
 

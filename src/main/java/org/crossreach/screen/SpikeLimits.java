@@ -5,18 +5,17 @@ package org.crossreach.screen;
  *
  * @param relative for a cell relative to the middle of its ensemble
  * @param overGround for a cell over the ground
- * @param ensemble for the middle of an ensemble
  * @param least the least of them that the river allows; change of velocity across comes on top
  */
-record SpikeLimits(double relative, double overGround, double ensemble, double least) {
+record SpikeLimits(double relative, double overGround, double least) {
 
   private static final double SHARPER = 0.9;
 
-  static final SpikeLimits NONE = new SpikeLimits(Double.NaN, Double.NaN, Double.NaN, Double.NaN);
+  static final SpikeLimits NONE = new SpikeLimits(Double.NaN, Double.NaN, Double.NaN);
 
   /** The same limit for all. */
   static SpikeLimits of(double limit) {
-    return new SpikeLimits(limit, limit, limit, limit);
+    return new SpikeLimits(limit, limit, limit);
   }
 
   /** Whether comparing relative to the middle is clearly sharper than over the ground. */

@@ -23,9 +23,6 @@ final class SpikeScreen {
   private static final int FEWEST_CELLS = 4;
   private static final int MOST_NEIGHBOURS = 2 * REACH + 6;
 
-  /** More than half of the cells of the same depth before and after. */
-  private static final int MAJORITY = REACH + 1;
-
   private static final double HALF_SQRT_2 = Math.sqrt(0.5);
 
   private final CellFacts facts;
@@ -33,6 +30,7 @@ final class SpikeScreen {
   private final AlignedRows rows;
   private final double[] nearEast = new double[MOST_NEIGHBOURS];
   private final double[] nearNorth = new double[MOST_NEIGHBOURS];
+  private final int[] suspect;
   private boolean hasMiddle;
   private int neighbours;
   private double departureEast;
@@ -42,6 +40,7 @@ final class SpikeScreen {
     this.facts = facts;
     this.window = window;
     this.rows = new AlignedRows(facts, window);
+    this.suspect = new int[facts.cells()];
   }
 
   /** Prepares the ensemble whose cells are to be compared. */
@@ -55,23 +54,30 @@ final class SpikeScreen {
    *
    * @param limits largest departures (m/s), NaN where nothing is known to judge by
    * @param reasons reasons of the ensemble's cells; a used one that departs becomes a spike
-   * @return whether any cell departs
+   * @return how many cells depart
    */
-  boolean mark(SpikeLimits limits, byte[] reasons) {
-    boolean any = false;
-    boolean both = compares(true) && (!compares(false) || limits.relativeIsSharper());
-    double relative = both ? limits.relative() : Double.POSITIVE_INFINITY;
-    double overGround = compares(false) ? limits.overGround() : Double.POSITIVE_INFINITY;
-    for (int k = 0; k < reasons.length; k++) {
-      if (reasons[k] == 0
-          && !rows.mostAgree(k, MAJORITY, relative * HALF_SQRT_2, overGround * HALF_SQRT_2)
-          && (departs(k, true, relative, limits.least())
-              || departs(k, false, overGround, limits.least()))) {
-        reasons[k] = Reason.SPIKE.code();
-        any = true;
+  int mark(SpikeLimits limits, byte[] reasons) {
+    int marked = 0;
+    if (compares(false)) {
+      marked += mark(false, limits.overGround(), limits.least(), reasons);
+    }
+    if (compares(true) && window.hasMiddles()) {
+      marked += mark(true, limits.relative(), limits.least(), reasons);
+    }
+    return marked;
+  }
+
+  private int mark(boolean toMiddle, double limit, double least, byte[] reasons) {
+    rows.relative(toMiddle);
+    int suspects = rows.disagreeing(limit * HALF_SQRT_2, reasons, suspect);
+    int marked = 0;
+    for (int s = 0; s < suspects; s++) {
+      if (departs(suspect[s], limit, least)) {
+        reasons[suspect[s]] = Reason.SPIKE.code();
+        marked++;
       }
     }
-    return any;
+    return marked;
   }
 
   /** Whether the ensemble's cells can be compared in a way. */
@@ -79,8 +85,7 @@ final class SpikeScreen {
     return toMiddle ? hasMiddle : facts.boatKnown();
   }
 
-  private boolean departs(int cell, boolean toMiddle, double limit, double least) {
-    rows.relative(toMiddle);
+  private boolean departs(int cell, double limit, double least) {
     collect(cell);
     if (neighbours < FEWEST_NEIGHBOURS || agrees(cell, limit * HALF_SQRT_2)) {
       return false;
@@ -135,27 +140,6 @@ final class SpikeScreen {
     } else {
       compare(cell);
     }
-  }
-
-  /**
-   * Measures the departure of the middle of an ensemble from those of its neighbours into {@link
-   * #departureEast()} and {@link #departureNorth()}, NaN when it has too few neighbours.
-   */
-  void measureMiddle(int ensemble) {
-    neighbours = 0;
-    for (int d = -REACH; d <= REACH; d++) {
-      int other = ensemble + d;
-      if (d != 0 && other >= 0 && other < facts.size() && window.used(other) > 0) {
-        nearEast[neighbours] = window.middleEast(other);
-        nearNorth[neighbours] = window.middleNorth(other);
-        neighbours++;
-      }
-    }
-    boolean enough = neighbours >= FEWEST_NEIGHBOURS;
-    departureEast =
-        enough ? window.middleEast(ensemble) - Median.of(nearEast, neighbours) : Double.NaN;
-    departureNorth =
-        enough ? window.middleNorth(ensemble) - Median.of(nearNorth, neighbours) : Double.NaN;
   }
 
   double departureEast() {

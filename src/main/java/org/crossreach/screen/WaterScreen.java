@@ -182,11 +182,10 @@ final class WaterScreen {
   }
 
   private SpikeLimits automaticSpikes(CellJudge judge) {
-    RowWindow window = new RowWindow(facts, judge);
+    RowWindow window = new RowWindow(facts, judge, /* middles= */ true);
     SpikeScreen spikes = new SpikeScreen(facts, window);
     Departures relative = new Departures(spikes);
     Departures overGround = new Departures(spikes);
-    Departures middles = new Departures(spikes);
     Sample speeds = new Sample();
     for (int i = 0; i < facts.size(); i += stride) {
       spikes.centreOn(i);
@@ -198,8 +197,6 @@ final class WaterScreen {
           overGround.add();
         }
       }
-      spikes.measureMiddle(i);
-      middles.add();
       double e = window.middleEast(i);
       double n = window.middleNorth(i);
       speeds.add(Math.sqrt(e * e + n * n));
@@ -208,8 +205,7 @@ final class WaterScreen {
         facts.boatKnown()
             ? Math.max(SPIKE_FLOOR_MPS, SPIKE_FLOOR_SHARE * speeds.median())
             : SPIKE_FLOOR_WITHOUT_BOAT_MPS;
-    return new SpikeLimits(
-        relative.limit(floor), overGround.limit(floor), middles.limit(floor), floor);
+    return new SpikeLimits(relative.limit(floor), overGround.limit(floor), floor);
   }
 
   /** Departures as the spike screen measured them last. */
@@ -229,58 +225,32 @@ final class WaterScreen {
   }
 
   private void judgeAll(CellJudge judge, SpikeLimits limits) {
-    RowWindow window = new RowWindow(facts, judge);
+    boolean relative = !facts.boatKnown() || limits.relativeIsSharper();
+    RowWindow window = new RowWindow(facts, judge, relative);
     SpikeScreen spikes = new SpikeScreen(facts, window);
+    boolean on = !Double.isNaN(limits.least());
+    boolean errors = facts.errors();
     int cells = facts.cells();
-    int[] three = new int[facts.size()];
     byte[] why = new byte[cells];
-    double[] middleEast = new double[facts.size()];
-    double[] middleNorth = new double[facts.size()];
     for (int i = 0; i < facts.size(); i++) {
       spikes.centreOn(i);
       System.arraycopy(window.reasons(i), 0, why, 0, cells);
-      boolean spiked = !Double.isNaN(limits.least()) && spikes.mark(limits, why);
-      boolean[] withoutError = window.withoutError(i);
-      for (int k = 0; k < cells; k++) {
-        three[i] += why[k] == 0 && withoutError[k] ? 1 : 0;
+      int used = window.used(i) - (on ? spikes.mark(limits, why) : 0);
+      if (used < screening.minimumCells()) {
+        leaveOut(why);
       }
       System.arraycopy(why, 0, reasons, i * cells, cells);
-      middleEast[i] = spiked ? window.medianOfUsed(window.east(i), why) : window.middleEast(i);
-      middleNorth[i] = spiked ? window.medianOfUsed(window.north(i), why) : window.middleNorth(i);
-    }
-    if (facts.boatKnown() && !Double.isNaN(limits.ensemble())) {
-      boolean[] jumps =
-          new VectorJumps(middleEast, middleNorth).beyond(limits.ensemble(), limits.least());
-      for (int i = 0; i < jumps.length; i++) {
-        if (jumps[i]) {
-          leaveOut(i, Reason.SPIKE);
-        }
-      }
-    }
-    boolean errors = facts.errors();
-    for (int i = 0; i < facts.size(); i++) {
-      int used = used(i);
-      if (used < screening.minimumCells()) {
-        leaveOut(i, Reason.FEW_CELLS);
-      } else if (errors && used > 0) {
-        threeBeam += three[i];
+      boolean[] withoutError = window.withoutError(i);
+      for (int k = 0; errors && k < cells; k++) {
+        threeBeam += why[k] == 0 && withoutError[k] ? 1 : 0;
       }
     }
   }
 
-  private int used(int ensemble) {
-    int used = 0;
-    for (int at = ensemble * facts.cells(); at < (ensemble + 1) * facts.cells(); at++) {
-      used += reasons[at] == 0 ? 1 : 0;
-    }
-    return used;
-  }
-
-  private void leaveOut(int ensemble, Reason reason) {
-    int cells = facts.cells();
-    for (int at = ensemble * cells; at < (ensemble + 1) * cells; at++) {
-      if (reasons[at] == 0) {
-        reasons[at] = reason.code();
+  private static void leaveOut(byte[] why) {
+    for (int k = 0; k < why.length; k++) {
+      if (why[k] == 0) {
+        why[k] = Reason.FEW_CELLS.code();
       }
     }
   }

@@ -2,6 +2,8 @@ package org.crossreach.screen;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
 
+import org.crossreach.settings.Limit;
+import org.crossreach.settings.Screening;
 import org.crossreach.survey.CellQuantity;
 import org.crossreach.survey.EnsembleQuantity;
 import org.junit.jupiter.api.Test;
@@ -59,6 +61,8 @@ class SpikeScreenTest {
     ScreenedPass pass = recording.screen();
     assertEquals(1, pass.accounting().cells().of(Reason.SPIKE));
     assertEquals(Reason.SPIKE, pass.reason(30, 5));
+    Screening given = Recording.with(Screening.defaults(), Criterion.SPIKES, Limit.of(0.5));
+    assertEquals(1, recording.screen(given).accounting().cells().of(Reason.SPIKE));
   }
 
   @Test
