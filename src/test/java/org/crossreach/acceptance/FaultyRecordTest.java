@@ -13,8 +13,6 @@ import org.crossreach.simulate.Fault;
 import org.crossreach.simulate.Recipe;
 import org.crossreach.simulate.Simulation;
 import org.junit.jupiter.api.Test;
-import org.junit.jupiter.params.ParameterizedTest;
-import org.junit.jupiter.params.provider.ValueSource;
 
 /**
  * Lost columns, spikes, lost bottom track and worse hardly move the discharge, and what is rejected
@@ -105,34 +103,5 @@ class FaultyRecordTest {
     }
     assertTrue(100.0 * caught / struck >= 99, caught + " of " + struck);
     assertTrue(100.0 * lost / good < 0.5, lost + " of " + good);
-  }
-
-  /** Without noise and faults no sample is rejected, whatever the river. */
-  @ParameterizedTest
-  @ValueSource(
-      strings = {
-        "{\"law\": \"power\"}",
-        "{\"law\": \"power\", \"exponent\": 0.33}",
-        "{\"law\": \"logarithmic\", \"roughness_m\": 0.02}",
-        "{\"law\": \"wind-above\", \"share\": 0.6}",
-        "{\"law\": \"rough-below\", \"share\": 0.3}"
-      })
-  void nothingIsRejectedOnACleanRiver(String vertical) throws Exception {
-    for (Rivers rivers :
-        new Rivers[] {
-          new Rivers().vertical(vertical).wobble(4).skew(20),
-          new Rivers().vertical(vertical).canal().wobble(1)
-        }) {
-      Simulation simulation = Simulation.run(rivers.frame("earth").recipe());
-      for (PassDischarge reduced :
-          new Reducer(1).reduce(simulation.measurement(), Settings.defaults()).passes()) {
-        ScreenedPass pass = reduced.section().pass();
-        assertEquals(0, pass.accounting().bottomTrack().rejected());
-        assertEquals(0, pass.accounting().depths().rejected());
-        assertEquals(0, pass.accounting().depthBeamsLeftOut());
-        assertEquals(
-            pass.accounting().cells().of(Reason.SIDE_LOBE), pass.accounting().cells().rejected());
-      }
-    }
   }
 }

@@ -13,7 +13,7 @@ public final class Rivers {
        "river": {"section_azimuth_deg": 62,
         %CHANNEL%,
         "vertical": %VERTICAL%, "skew_deg": %SKEW%},
-       "boat": {"ensemble_s": 1, "ensembles": 600, "hold_ensembles": 12, "speed_change": 0.2,
+       "boat": {"ensemble_s": 1, "ensembles": %ENSEMBLES%, "hold_ensembles": 12, "speed_change": 0.2,
                 "wobble_m": %WOBBLE%, "wobbles": 2.5, "left_edge_m": 4, "right_edge_m": 2},
        "attitude": {"heading_deg": 200, "heading_swing_deg": 10, %TILT%},
        "passes": {"count": %PASSES%, "first_bank": "left"},
@@ -45,6 +45,7 @@ public final class Rivers {
   private double skewDeg;
   private double wobbleM;
   private int passes = 2;
+  private int ensembles = 600;
   private String noise = "{}";
   private String faults = "{}";
   private String tilt = "\"pitch_deg\": 0, \"roll_deg\": 0";
@@ -60,6 +61,18 @@ public final class Rivers {
   /** A canal of 100 m by 5 m with vertical walls, in place of the natural channel. */
   public Rivers canal() {
     channel = CANAL;
+    return this;
+  }
+
+  /** Another channel: bed, velocity and banks as members of a recipe's river. */
+  Rivers channel(String members) {
+    channel = members;
+    return this;
+  }
+
+  /** Number of ensembles while the boat moves. */
+  Rivers ensembles(int count) {
+    ensembles = count;
     return this;
   }
 
@@ -120,6 +133,7 @@ public final class Rivers {
             .replace("%VERTICAL%", vertical)
             .replace("%SKEW%", Double.toString(skewDeg))
             .replace("%WOBBLE%", Double.toString(wobbleM))
+            .replace("%ENSEMBLES%", Integer.toString(ensembles))
             .replace("%PASSES%", Integer.toString(passes))
             .replace("%NOISE%", noise)
             .replace("%FAULTS%", faults)
