@@ -18,6 +18,7 @@ public final class Ensembles {
   private final long[] number;
   private final double[] elapsedS;
   private final int[] cells;
+  private final int maxCells;
   private final Map<EnsembleQuantity, double[]> columns;
   private final Map<CellQuantity, CellGrid> grids;
 
@@ -52,8 +53,8 @@ public final class Ensembles {
     requireLength("cells", cells.length);
     columns.forEach((quantity, values) -> requireLength(quantity.name(), values.length));
     grids.forEach((quantity, grid) -> requireLength(quantity.name(), grid.rows()));
-    grid(CellQuantity.WATER_1);
     grid(CellQuantity.WATER_2);
+    this.maxCells = grid(CellQuantity.WATER_1).cells();
   }
 
   private void requireLength(String name, int length) {
@@ -70,7 +71,7 @@ public final class Ensembles {
 
   /** Largest number of depth cells that an ensemble can have here. */
   public int maxCells() {
-    return grid(CellQuantity.WATER_1).cells();
+    return maxCells;
   }
 
   /** Axes of the velocities. */
