@@ -23,6 +23,7 @@ final class Rehearsal {
     rehearse("reduce", sample, "--json");
     rehearse("check", sample);
     rehearse("check", sample, "--json");
+    rehearse("compare", sample);
   }
 
   private static void rehearse(String... words) {

@@ -218,6 +218,20 @@ class DistributionIT {
   }
 
   @Test
+  void takesTheThoroughCompilerForLongWork() throws Exception {
+    Path large = Files.createDirectory(folder.resolve("large one"));
+    Files.createFile(large.resolve("measurement.json"));
+    String report = "-XX:+PrintFlagsFinal -XX:+UseSerialGC";
+    String quick = "TieredStopAtLevel                        = 1 ";
+    String program = launcher(BUILT).toString();
+    Map<String, String> options = Map.of("CROSSREACH_JAVA_OPTS", report);
+    assertTrue(start(folder, options, program, "check", large.toString()).out().contains(quick));
+    assertFalse(start(folder, options, program, "archive", large.toString()).out().contains(quick));
+    Files.write(large.resolve("pass-01.csv"), new byte[110_000_000]);
+    assertFalse(start(folder, options, program, "check", large.toString()).out().contains(quick));
+  }
+
+  @Test
   void readsNamesThatAreNotAsciiWithoutALocale() throws Exception {
     Path script = folder.resolve("script");
     Files.writeString(
