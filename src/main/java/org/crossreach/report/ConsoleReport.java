@@ -164,7 +164,23 @@ public record ConsoleReport(Result result, Units units) {
             + " reciprocal pairs, exposure "
             + new Decimals(0).of(summary.exposureS())
             + " s");
+    lines.add(samples());
     return lines;
+  }
+
+  /** Rejected cells and filled discharge of the used passes, the largest of each. */
+  private String samples() {
+    double usable = Double.NaN;
+    double filled = 0;
+    for (PassDischarge each : result.reduction().used()) {
+      usable = Math.min(Double.isNaN(usable) ? 100 : usable, each.geometry().usableCellsPct());
+      filled = Math.max(filled, each.geometry().filledDischargePct());
+    }
+    return "in every pass at least "
+        + new Decimals(1).of(usable)
+        + " % of the cells usable, at most "
+        + new Decimals(1).of(filled)
+        + " % filled in";
   }
 
   private void row(TextTable table, String name, Quantity quantity, Spread spread) {

@@ -55,6 +55,7 @@ final class PassesPart implements ResultPart {
     json.number("usable_cells_pct", each.geometry().usableCellsPct());
     json.number("filled_discharge_pct", each.geometry().filledDischargePct());
     json.number("deviation_pct", summary.dischargeM3s().deviationPct(each.totalM3s()));
+    AccountingObject.write(each, json);
     NotesArray.write(each.notes(), json);
   }
 }
