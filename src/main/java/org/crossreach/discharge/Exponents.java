@@ -1,12 +1,13 @@
 package org.crossreach.discharge;
 
-import java.util.ArrayList;
 import java.util.Collections;
 import java.util.List;
 import java.util.Optional;
+import java.util.stream.IntStream;
+import org.crossreach.profile.ColumnFit;
 import org.crossreach.profile.ExponentFit;
-import org.crossreach.section.Section;
 import org.crossreach.settings.Exponent;
+import org.crossreach.settings.ExponentRule;
 import org.crossreach.survey.Note;
 
 /**
@@ -54,28 +55,47 @@ public record Exponents(List<Chosen> passes) {
    *
    * @param laid the passes on their lines; unused ones do not count in a fit to all
    * @param exponent the rule, and the value that is fixed or stands in for a fit
-   * @param threads how many passes are fitted side by side
+   * @param threads how many passes are laid out side by side
    */
   public static Exponents of(LaidMeasurement laid, Exponent exponent, int threads) {
-    int count = laid.passes().size();
+    return exponent.rule() == ExponentRule.FIXED
+        ? fixed(laid, exponent)
+        : of(laid, exponent, columns(laid, threads));
+  }
+
+  /** The columns of each laid pass, laid out for fitting. */
+  public static List<ColumnFit> columns(LaidMeasurement laid, int threads) {
+    return Workers.map(laid.passes(), threads, each -> ColumnFit.of(each.section()));
+  }
+
+  /**
+   * Finds the exponents from columns that are laid out already.
+   *
+   * @param laid as for the other method
+   * @param exponent as for the other method
+   * @param columns the columns of each laid pass
+   */
+  public static Exponents of(LaidMeasurement laid, Exponent exponent, List<ColumnFit> columns) {
     return switch (exponent.rule()) {
-      case FIXED -> new Exponents(Collections.nCopies(count, Chosen.fixed(exponent.value())));
+      case FIXED -> fixed(laid, exponent);
       case FIT_PASS ->
           new Exponents(
-              Workers.map(
-                  laid.passes(),
-                  threads,
-                  each -> Chosen.of(ExponentFit.of(List.of(each.section())), exponent.value())));
+              columns.stream()
+                  .map(each -> Chosen.of(ExponentFit.of(List.of(each)), exponent.value()))
+                  .toList());
       case FIT_ALL -> {
-        List<Section> used = new ArrayList<>();
-        for (LaidPass each : laid.passes()) {
-          if (each.pass().used()) {
-            used.add(each.section());
-          }
-        }
+        List<ColumnFit> used =
+            IntStream.range(0, columns.size())
+                .filter(p -> laid.passes().get(p).pass().used())
+                .mapToObj(columns::get)
+                .toList();
         yield new Exponents(
-            Collections.nCopies(count, Chosen.of(ExponentFit.of(used), exponent.value())));
+            Collections.nCopies(columns.size(), Chosen.of(ExponentFit.of(used), exponent.value())));
       }
     };
+  }
+
+  private static Exponents fixed(LaidMeasurement laid, Exponent exponent) {
+    return new Exponents(Collections.nCopies(laid.passes().size(), Chosen.fixed(exponent.value())));
   }
 }
