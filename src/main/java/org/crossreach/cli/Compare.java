@@ -4,22 +4,24 @@ import java.io.ByteArrayOutputStream;
 import java.io.IOException;
 import java.io.PrintWriter;
 import java.nio.charset.StandardCharsets;
-import java.nio.file.FileSystemException;
-import java.nio.file.Files;
 import java.nio.file.Path;
-import java.nio.file.StandardCopyOption;
 import java.util.ArrayList;
+import java.util.EnumSet;
 import java.util.List;
 import java.util.concurrent.Callable;
-import org.crossreach.discharge.Reducer;
+import org.crossreach.evidence.Comparer;
 import org.crossreach.evidence.Comparison;
+import org.crossreach.evidence.Verdict;
 import org.crossreach.ingest.MeasurementFolder;
 import org.crossreach.ingest.SettingsFile;
-import org.crossreach.report.SettingsJson;
-import org.crossreach.report.Units;
+import org.crossreach.report.FileKind;
+import org.crossreach.report.OutputFolder;
+import org.crossreach.report.SettingsFolder;
 import org.crossreach.report.comparison.ComparisonCsv;
+import org.crossreach.report.comparison.ComparisonFiles;
 import org.crossreach.report.comparison.ComparisonJson;
 import org.crossreach.report.comparison.ComparisonText;
+import org.crossreach.report.comparison.SiteText;
 import org.crossreach.settings.Settings;
 import org.crossreach.survey.Measurement;
 import org.crossreach.survey.UnusableInput;
@@ -27,106 +29,137 @@ import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.Option;
+import picocli.CommandLine.ParameterException;
 import picocli.CommandLine.Parameters;
 import picocli.CommandLine.Spec;
 
-/** Compares every choice of extrapolation, with the evidence for each. */
+/** Compares every choice of laws and exponent for the unmeasured water, with the evidence. */
 @Command(
     name = "compare",
     description =
-        "Show every choice of extrapolation side by side, with the evidence for each; several"
-            + " measurements of a site too.")
+        "Compare every choice of laws and exponent for the unmeasured water, with what the measured"
+            + " cells say about each.")
 final class Compare implements Callable<Integer> {
+
+  private static final Path DEFAULT_OUT = Path.of("reports");
 
   @Parameters(
       arity = "1..*",
       paramLabel = "FOLDER",
-      description = "The folders of the measurements.")
+      description = "The folder of a measurement; several are set side by side.")
   private List<Path> folders;
 
   @Mixin private ChoiceOptions choices;
 
-  @Option(names = "--json", order = 90, description = "Print JSON, for machines.")
-  private boolean json;
-
-  @Option(names = "--csv", order = 91, description = "Print a CSV table, for machines.")
-  private boolean csv;
+  @Mixin private PassOptions passes;
 
   @Option(
-      names = "--units",
-      order = 92,
-      paramLabel = "si|us",
-      defaultValue = "si",
-      description = "Units of the tables: SI or US customary (default: si).")
-  private Units units;
+      names = "--write",
+      order = 80,
+      split = ",",
+      paramLabel = "KIND",
+      description =
+          "Write files of these kinds, with commas between them: json, csv, png, svg;"
+              + " comparison.json always comes with them. Without --out they go to reports/."
+              + " (with --out alone: json,csv)")
+  private List<FileKind> kinds = List.of();
 
   @Option(
       names = "--write-settings",
-      order = 93,
+      order = 81,
       description =
-          "Write what the evidence favours into the settings.json of each measurement; without"
-              + " this nothing is ever changed.")
+          "Where the evidence favours another choice, write it into the measurement's"
+              + " settings.json. Without this nothing changes.")
   private boolean writeSettings;
+
+  @Option(names = "--csv", order = 89, description = "Print every combination as a CSV table.")
+  private boolean csv;
+
+  @Mixin private OutputOptions output;
 
   @Spec private CommandSpec spec;
 
   @Override
   public Integer call() throws UnusableInput, IOException {
+    for (FileKind kind : kinds) {
+      if (!ComparisonFiles.KINDS.contains(kind)) {
+        throw new ParameterException(
+            spec.commandLine(), "A comparison cannot be written as " + kind.key());
+      }
+    }
     List<Comparison> comparisons = new ArrayList<>();
     for (Path folder : folders) {
-      Measurement measurement = MeasurementFolder.read(folder);
+      Measurement measurement = passes.applyTo(MeasurementFolder.read(folder), spec.commandLine());
       Settings settings = choices.applyTo(SettingsFile.read(folder));
-      comparisons.add(Comparison.of(measurement, settings, Reducer.onAllProcessors()));
+      comparisons.add(Comparer.onAllProcessors().compare(measurement, settings));
+    }
+    if (output.out != null || !kinds.isEmpty()) {
+      for (Comparison each : comparisons) {
+        write(each);
+      }
     }
     print(comparisons);
-    for (int f = 0; writeSettings && f < folders.size(); f++) {
-      writeSettings(folders.get(f).resolve("settings.json"), comparisons.get(f));
+    if (writeSettings) {
+      for (int m = 0; m < folders.size(); m++) {
+        writeSettings(comparisons.get(m), folders.get(m));
+      }
     }
     return ExitCode.DONE;
   }
 
   private void print(List<Comparison> comparisons) throws IOException {
     PrintWriter out = spec.commandLine().getOut();
-    if (json || csv) {
+    if (output.json || csv) {
       ByteArrayOutputStream bytes = new ByteArrayOutputStream();
-      if (json) {
+      if (output.json) {
         ComparisonJson.write(comparisons, bytes);
       } else {
         ComparisonCsv.write(comparisons, bytes);
       }
       out.print(bytes.toString(StandardCharsets.UTF_8));
     } else {
-      for (Comparison comparison : comparisons) {
-        out.print(new ComparisonText(comparison, units).text());
-        out.print(comparisons.size() > 1 ? "\n" : "");
+      List<String> texts = new ArrayList<>();
+      for (Comparison each : comparisons) {
+        texts.add(new ComparisonText(each, output.units).text());
       }
       if (comparisons.size() > 1) {
-        out.print(ComparisonText.sideBySide(comparisons));
+        texts.add(new SiteText(comparisons).text());
       }
+      out.print(String.join("\n", texts));
     }
     out.flush();
   }
 
-  private void writeSettings(Path file, Comparison comparison) throws CannotWrite {
-    Settings favoured = comparison.favoured().settings();
+  private void write(Comparison comparison) throws CannotWrite {
+    Path root = output.out == null ? DEFAULT_OUT : output.out;
+    Path target = root.resolve(comparison.chosen().reduction().measurement().id());
+    EnumSet<FileKind> wanted = EnumSet.of(FileKind.JSON);
+    wanted.addAll(kinds.isEmpty() ? List.of(FileKind.CSV) : kinds);
     CannotWrite.unless(
-        file,
+        target,
         () -> {
-          if (Files.exists(file) && !Files.readString(file).contains(SettingsJson.FORMAT)) {
-            throw new FileSystemException(
-                file.toString(), null, "this is not a settings.json of crossreach");
+          OutputFolder files = OutputFolder.claim(target);
+          for (FileKind kind : wanted) {
+            ComparisonFiles.write(comparison, kind, output.units, files);
           }
-          ByteArrayOutputStream bytes = new ByteArrayOutputStream();
-          SettingsJson.write(favoured, bytes);
-          Path unfinished =
-              file.resolveSibling(".settings.json." + ProcessHandle.current().pid() + ".part");
-          Files.write(unfinished, bytes.toByteArray());
-          Files.move(
-              unfinished,
-              file,
-              StandardCopyOption.ATOMIC_MOVE,
-              StandardCopyOption.REPLACE_EXISTING);
         });
-    spec.commandLine().getErr().println("written to " + file);
+    remark("written to " + target);
+  }
+
+  private void writeSettings(Comparison comparison, Path folder) throws CannotWrite {
+    Verdict verdict = comparison.verdict();
+    if (verdict.kind() != Verdict.Kind.CHANGE) {
+      remark("settings of " + folder + " stay as they are");
+      return;
+    }
+    Settings settings = verdict.combination().in(comparison.chosen().reduction().settings());
+    CannotWrite.unless(folder, () -> SettingsFolder.write(settings, folder));
+    remark("settings of " + folder + " changed to " + verdict.combination().text());
+  }
+
+  private void remark(String text) {
+    if (!output.quiet) {
+      spec.commandLine().getErr().println(text);
+    }
   }
 }

@@ -7,7 +7,6 @@ import java.util.stream.IntStream;
 import org.crossreach.profile.ColumnFit;
 import org.crossreach.profile.ExponentFit;
 import org.crossreach.settings.Exponent;
-import org.crossreach.settings.ExponentRule;
 import org.crossreach.survey.Note;
 
 /**
@@ -58,9 +57,14 @@ public record Exponents(List<Chosen> passes) {
    * @param threads how many passes are laid out side by side
    */
   public static Exponents of(LaidMeasurement laid, Exponent exponent, int threads) {
-    return exponent.rule() == ExponentRule.FIXED
-        ? fixed(laid, exponent)
-        : of(laid, exponent, columns(laid, threads));
+    return switch (exponent.rule()) {
+      case FIXED -> fixed(laid, exponent.value());
+      case FIT_PASS -> fitted(passFits(columns(laid, threads)), exponent.value());
+      case FIT_ALL ->
+          fitted(
+              Collections.nCopies(laid.passes().size(), fitToAll(laid, columns(laid, threads))),
+              exponent.value());
+    };
   }
 
   /** The columns of each laid pass, laid out for fitting. */
@@ -68,34 +72,32 @@ public record Exponents(List<Chosen> passes) {
     return Workers.map(laid.passes(), threads, each -> ColumnFit.of(each.section()));
   }
 
-  /**
-   * Finds the exponents from columns that are laid out already.
-   *
-   * @param laid as for the other method
-   * @param exponent as for the other method
-   * @param columns the columns of each laid pass
-   */
-  public static Exponents of(LaidMeasurement laid, Exponent exponent, List<ColumnFit> columns) {
-    return switch (exponent.rule()) {
-      case FIXED -> fixed(laid, exponent);
-      case FIT_PASS ->
-          new Exponents(
-              columns.stream()
-                  .map(each -> Chosen.of(ExponentFit.of(List.of(each)), exponent.value()))
-                  .toList());
-      case FIT_ALL -> {
-        List<ColumnFit> used =
-            IntStream.range(0, columns.size())
-                .filter(p -> laid.passes().get(p).pass().used())
-                .mapToObj(columns::get)
-                .toList();
-        yield new Exponents(
-            Collections.nCopies(columns.size(), Chosen.of(ExponentFit.of(used), exponent.value())));
-      }
-    };
+  /** A fit to each pass alone. */
+  public static List<ExponentFit> passFits(List<ColumnFit> columns) {
+    return columns.stream().map(each -> ExponentFit.of(List.of(each))).toList();
   }
 
-  private static Exponents fixed(LaidMeasurement laid, Exponent exponent) {
-    return new Exponents(Collections.nCopies(laid.passes().size(), Chosen.fixed(exponent.value())));
+  /** A fit to all used passes together. */
+  public static ExponentFit fitToAll(LaidMeasurement laid, List<ColumnFit> columns) {
+    return ExponentFit.of(
+        IntStream.range(0, columns.size())
+            .filter(p -> laid.passes().get(p).pass().used())
+            .mapToObj(columns::get)
+            .toList());
+  }
+
+  /** One exponent for each laid pass. */
+  public static Exponents fixed(LaidMeasurement laid, double value) {
+    return new Exponents(Collections.nCopies(laid.passes().size(), Chosen.fixed(value)));
+  }
+
+  /**
+   * The fitted exponents, where the data could tell them.
+   *
+   * @param fits the fit for each laid pass
+   * @param fallback what stands in for a fit that the data could not tell
+   */
+  public static Exponents fitted(List<ExponentFit> fits, double fallback) {
+    return new Exponents(fits.stream().map(each -> Chosen.of(each, fallback)).toList());
   }
 }

@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.stream.IntStream;
 import org.crossreach.profile.Transports;
+import org.crossreach.profile.VerticalChoice;
 import org.crossreach.profile.Zone;
 import org.crossreach.section.Section;
 import org.crossreach.settings.Method;
@@ -61,32 +62,66 @@ public record Reducer(int threads) {
    * @param settings the choices of laws, exponent, method and edges
    */
   public Reduction integrate(LaidMeasurement laid, Settings settings) {
-    return integrate(laid, settings, Exponents.of(laid, settings.exponent(), threads));
+    return integrate(
+            laid, List.of(settings), List.of(Exponents.of(laid, settings.exponent(), threads)))
+        .get(0);
   }
 
   /**
-   * Integrates laid passes with exponents that are known already.
+   * Integrates laid passes by several choices at once, which costs little more than one.
    *
    * @param laid as for the other method
-   * @param settings as for the other method; its exponent is not looked at
-   * @param exponents the exponent of each laid pass
+   * @param choices as for the other method; their exponents are not looked at
+   * @param exponents for each of the choices the exponents of the laid passes
+   * @return a reduction for each of the choices, in their order
    */
-  public Reduction integrate(LaidMeasurement laid, Settings settings, Exponents exponents) {
+  public List<Reduction> integrate(
+      LaidMeasurement laid, List<Settings> choices, List<Exponents> exponents) {
     List<Integer> places = IntStream.range(0, laid.passes().size()).boxed().toList();
-    List<PassDischarge> passes =
+    List<List<PassDischarge>> byPass =
         Workers.map(
             places,
             threads,
-            place -> discharge(laid.passes().get(place), settings, exponents.passes().get(place)));
-    return new Reduction(laid.measurement(), settings, passes, laid.notes());
+            place -> discharges(laid.passes().get(place), place, choices, exponents));
+    List<Reduction> reductions = new ArrayList<>();
+    for (int choice = 0; choice < choices.size(); choice++) {
+      List<PassDischarge> passes = new ArrayList<>();
+      for (List<PassDischarge> pass : byPass) {
+        passes.add(pass.get(choice));
+      }
+      reductions.add(new Reduction(laid.measurement(), choices.get(choice), passes, laid.notes()));
+    }
+    return reductions;
+  }
+
+  private static List<PassDischarge> discharges(
+      LaidPass laid, int place, List<Settings> choices, List<Exponents> exponents) {
+    List<VerticalChoice> verticals = new ArrayList<>();
+    for (int choice = 0; choice < choices.size(); choice++) {
+      Settings settings = choices.get(choice);
+      verticals.add(
+          new VerticalChoice(
+              settings.top(),
+              settings.bottom(),
+              exponents.get(choice).passes().get(place).value()));
+    }
+    List<Transports> transports = Transports.all(laid.section(), verticals);
+    List<PassDischarge> discharges = new ArrayList<>();
+    for (int choice = 0; choice < choices.size(); choice++) {
+      discharges.add(
+          discharge(
+              laid,
+              choices.get(choice),
+              exponents.get(choice).passes().get(place),
+              transports.get(choice)));
+    }
+    return discharges;
   }
 
   private static PassDischarge discharge(
-      LaidPass laid, Settings settings, Exponents.Chosen exponent) {
+      LaidPass laid, Settings settings, Exponents.Chosen exponent, Transports transports) {
     Pass pass = laid.pass();
     Section section = laid.section();
-    Transports transports =
-        Transports.of(section, settings.top(), settings.bottom(), exponent.value());
     int wanted = settings.edgeEnsembles();
     boolean leftFirst = pass.startBank() == Bank.LEFT;
     EdgeEstimate left = EdgeEstimate.of(pass.leftEdge(), leftFirst, section, transports, wanted);

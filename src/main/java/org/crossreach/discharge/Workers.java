@@ -9,7 +9,7 @@ import java.util.concurrent.Future;
 import java.util.function.Function;
 
 /** Does the same to several things side by side. */
-final class Workers {
+public final class Workers {
 
   private Workers() {}
 
@@ -18,7 +18,7 @@ final class Workers {
    *
    * @param threads at least 1; with 1, or one item, everything happens on the calling thread
    */
-  static <A, B> List<B> map(List<A> items, int threads, Function<A, B> function) {
+  public static <A, B> List<B> map(List<A> items, int threads, Function<A, B> function) {
     List<B> results = new ArrayList<>(items.size());
     if (threads == 1 || items.size() < 2) {
       for (A item : items) {

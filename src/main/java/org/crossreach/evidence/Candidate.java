@@ -1,45 +1,83 @@
 package org.crossreach.evidence;
 
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
 import org.crossreach.profile.Laws;
 import org.crossreach.profile.VelocityLaw;
 import org.crossreach.profile.Zone;
 import org.crossreach.settings.BottomLaw;
+import org.crossreach.settings.Choice;
 import org.crossreach.settings.ExponentRule;
 import org.crossreach.settings.TopLaw;
 
 /**
- * A law for one unmeasured zone, with the rule of its exponent.
+ * A law for one unmeasured zone, with the rule for its exponent where it has one.
  *
- * @param zone top or bottom
- * @param law key of the law in settings
- * @param velocityLaw the law
- * @param rule where the exponent comes from; {@link ExponentRule#FIXED} for a law without one
- * @param hasExponent whether the law has an exponent at all
+ * @param zone {@link Zone#TOP} or {@link Zone#BOTTOM}
+ * @param law key of the law in the settings
+ * @param rule rule for the exponent; empty when the exponent does not matter to the law
  */
-public record Candidate(
-    Zone zone, String law, VelocityLaw velocityLaw, ExponentRule rule, boolean hasExponent) {
+public record Candidate(Zone zone, String law, Optional<ExponentRule> rule) {
 
   static Candidate of(TopLaw law, ExponentRule rule) {
-    boolean hasExponent =
-        switch (law) {
-          case POWER -> true;
-          case CONSTANT, THREE_POINT -> false;
-        };
-    return new Candidate(
-        Zone.TOP, law.key(), Laws.of(law), hasExponent ? rule : ExponentRule.FIXED, hasExponent);
+    return new Candidate(Zone.TOP, law.key(), rule(Laws.of(law), rule));
   }
 
   static Candidate of(BottomLaw law, ExponentRule rule) {
-    return new Candidate(Zone.BOTTOM, law.key(), Laws.of(law), rule, true);
+    return new Candidate(Zone.BOTTOM, law.key(), rule(Laws.of(law), rule));
   }
 
-  /** Whether this is the same choice as another. */
-  boolean same(Candidate other) {
-    return zone == other.zone && law.equals(other.law) && rule == other.rule;
+  private static Optional<ExponentRule> rule(VelocityLaw law, ExponentRule rule) {
+    return law.takesExponent() ? Optional.of(rule) : Optional.empty();
   }
 
-  /** The law and, where it has an exponent, its rule, for example {@code power, fit-all}. */
-  public String label() {
-    return hasExponent ? law + ", " + rule.key() : law;
+  /** Every candidate for the surface, then every one for the bed, in a fixed order. */
+  static List<Candidate> all() {
+    List<Candidate> all = new ArrayList<>();
+    for (Combination each : Combination.all()) {
+      addNew(all, each.atTop());
+    }
+    for (Combination each : Combination.all()) {
+      addNew(all, each.atBottom());
+    }
+    return List.copyOf(all);
+  }
+
+  private static void addNew(List<Candidate> all, Candidate candidate) {
+    if (!all.contains(candidate)) {
+      all.add(candidate);
+    }
+  }
+
+  /** The law itself. */
+  VelocityLaw velocityLaw() {
+    return switch (zone) {
+      case TOP -> Laws.of(option(TopLaw.class));
+      case BOTTOM -> Laws.of(option(BottomLaw.class));
+      case MEASURED -> throw new IllegalStateException("nothing is estimated where cells are");
+    };
+  }
+
+  private <E extends Enum<E> & Choice> E option(Class<E> options) {
+    return Choice.find(options, law).orElseThrow();
+  }
+
+  /** How freely the exponent varies: not at all, once, or in each pass. */
+  int freedom() {
+    return rule.isEmpty() ? 0 : freedom(rule.get());
+  }
+
+  static int freedom(ExponentRule rule) {
+    return switch (rule) {
+      case FIXED -> 0;
+      case FIT_ALL -> 1;
+      case FIT_PASS -> 2;
+    };
+  }
+
+  /** For people, for example {@code power fit-all} or {@code constant}. */
+  public String text() {
+    return rule.isEmpty() ? law : law + " " + rule.get().key();
   }
 }

@@ -1,9 +1,9 @@
 /**
- * Evidence for the choice of extrapolation: what the laws predict for cells that were measured, and
- * what every choice makes of the discharge.
+ * What the measured cells say about the choice of laws and exponent for the unmeasured water.
  *
- * <p>Comes in: a measurement whose passes are laid on their lines, and the chosen settings. Goes
- * out: a {@link org.crossreach.evidence.Comparison}. Start at {@link
- * org.crossreach.evidence.Comparison#of}. Called by {@code report} and {@code cli}.
+ * <p>Comes in: a measurement and its chosen settings. Goes out: a {@link
+ * org.crossreach.evidence.Comparison} of every combination of laws and exponent rules, with the
+ * errors each makes on hidden cells and a {@link org.crossreach.evidence.Verdict}. Start at {@link
+ * org.crossreach.evidence.Comparer}. Called by {@code report} and what follows it.
  */
 package org.crossreach.evidence;

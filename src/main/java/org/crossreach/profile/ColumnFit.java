@@ -23,7 +23,7 @@ public final class ColumnFit {
   static final int FEWEST_CELLS = 4;
 
   /** Most columns that are looked at; of a longer pass every n-th, evenly spread. */
-  private static final int MOST_COLUMNS = 4000;
+  private static final int MOST_COLUMNS = 2000;
 
   /** Lowest exponent that is searched. */
   static final double LOWEST = 0.01;
@@ -47,15 +47,28 @@ public final class ColumnFit {
 
   private static final double NONE = 6;
 
+  private static final int BLOCK = 20;
+  private static final int MOST_REWEIGHTINGS = 3;
+
+  /** An exponent that moves by less than this from one weighting to the next has settled. */
+  private static final double SETTLED = 5e-4;
+
   private int columns;
   private int[] firstCell;
   private double[] velocity;
   private double[] upper;
   private double[] lower;
   private double[] weight;
+  private Powers base;
+  private Powers step;
+  private final FlowDirection direction;
   private final double[] total = new double[NODES];
 
-  private ColumnFit(int columns, int cells) {
+  /** A power of the edges of every cell; cells that touch share one. */
+  private record Powers(double[] upper, double[] lower) {}
+
+  private ColumnFit(int columns, int cells, FlowDirection direction) {
+    this.direction = direction;
     firstCell = new int[columns + 1];
     velocity = new double[columns * cells];
     upper = new double[columns * cells];
@@ -73,18 +86,19 @@ public final class ColumnFit {
     VelocityRow row = section.newRow();
     Column column = section.newColumn();
     int step = 1 + (section.size() - 1) / MOST_COLUMNS;
-    ColumnFit fit = new ColumnFit(1 + (section.size() - 1) / step, section.pass().maxCells());
+    ColumnFit fit =
+        new ColumnFit(1 + (section.size() - 1) / step, section.pass().maxCells(), direction);
     for (int i = 0; i < section.size(); i += step) {
       section.read(i, row, column);
       if (column.size() >= FEWEST_CELLS && !section.depthFilled(i)) {
-        fit.add(column, direction);
+        fit.add(column);
       }
     }
     fit.settle();
     return fit;
   }
 
-  private void add(Column column, FlowDirection direction) {
+  private void add(Column column) {
     int j = firstCell[columns];
     for (int k = 0; k < column.size(); k++, j++) {
       velocity[j] =
@@ -105,11 +119,36 @@ public final class ColumnFit {
     firstCell = Arrays.copyOf(firstCell, columns + 1);
     weight = new double[cells];
     Arrays.fill(weight, 1);
+    base = powers(LOWEST + 1);
+    step = powers(STEP);
     sumUp();
-    for (int r = 0; r < 2 && columns > 0; r++) {
-      reweight(ExponentSearch.top(this::explained, LOWEST, HIGHEST));
+    double before = Double.NaN;
+    for (int r = 0; r < MOST_REWEIGHTINGS && columns > 0; r++) {
+      double exponent = ExponentSearch.top(this::explained, LOWEST, HIGHEST);
+      if (Math.abs(exponent - before) < SETTLED) {
+        break;
+      }
+      reweight(exponent);
       sumUp();
+      before = exponent;
     }
+  }
+
+  private Powers powers(double exponent) {
+    Powers powers = new Powers(new double[upper.length], new double[upper.length]);
+    for (int j = 0; j < upper.length; j++) {
+      powers.upper[j] =
+          j > 0 && upper[j] == lower[j - 1]
+              ? powers.lower[j - 1]
+              : FastMath.pow(upper[j], exponent);
+      powers.lower[j] = FastMath.pow(lower[j], exponent);
+    }
+    return powers;
+  }
+
+  /** The axis of flow along which the velocities are taken. */
+  public FlowDirection direction() {
+    return direction;
   }
 
   /** Number of columns. */
@@ -142,17 +181,15 @@ public final class ColumnFit {
       Arrays.fill(product, 0);
       Arrays.fill(square, 0);
       for (int j = firstCell[c]; j < firstCell[c + 1]; j++) {
-        double high = FastMath.pow(upper[j], LOWEST + 1);
-        double highStep = FastMath.pow(upper[j], STEP);
-        double low = FastMath.pow(lower[j], LOWEST + 1);
-        double lowStep = FastMath.pow(lower[j], STEP);
+        double high = base.upper[j];
+        double low = base.lower[j];
         double perHeight = 1 / (upper[j] - lower[j]);
         for (int k = 0; k < NODES; k++) {
           double shape = (high - low) * perHeight;
           product[k] += weight[j] * velocity[j] * shape;
           square[k] += weight[j] * shape * shape;
-          high *= highStep;
-          low *= lowStep;
+          high *= step.upper[j];
+          low *= step.lower[j];
         }
       }
       for (int k = 0; k < NODES; k++) {
@@ -161,16 +198,32 @@ public final class ColumnFit {
     }
   }
 
-  /** What the model explains of the weighted squares of one column (m²/s²). */
-  double explained(int column, double exponent) {
-    double product = 0;
-    double square = 0;
-    for (int j = firstCell[column]; j < firstCell[column + 1]; j++) {
-      double shape = shape(j, exponent);
-      product += weight[j] * velocity[j] * shape;
-      square += weight[j] * shape * shape;
+  /**
+   * What the model explains of the weighted squares of each column (m²/s²), for three exponents.
+   *
+   * @param exponent the middle one
+   * @param apart distance of the others
+   * @return for each column the value below, at and above the middle
+   */
+  double[][] explainedAround(double exponent, double apart) {
+    Powers first = powers(exponent - apart + 1);
+    Powers further = powers(apart);
+    double[][] explained = new double[columns][3];
+    for (int side = 0; side < 3; side++) {
+      for (int c = 0; c < columns; c++) {
+        double product = 0;
+        double square = 0;
+        for (int j = firstCell[c]; j < firstCell[c + 1]; j++) {
+          double shape = (first.upper[j] - first.lower[j]) / (upper[j] - lower[j]);
+          product += weight[j] * velocity[j] * shape;
+          square += weight[j] * shape * shape;
+          first.upper[j] *= further.upper[j];
+          first.lower[j] *= further.lower[j];
+        }
+        explained[c][side] = square > 0 ? product * product / square : 0;
+      }
     }
-    return square > 0 ? product * product / square : 0;
+    return explained;
   }
 
   private double amplitude(int column, double[] shapes) {
@@ -183,15 +236,11 @@ public final class ColumnFit {
     return square > 0 ? product / square : 0;
   }
 
-  private double shape(int j, double exponent) {
-    return (FastMath.pow(upper[j], exponent + 1) - FastMath.pow(lower[j], exponent + 1))
-        / (upper[j] - lower[j]);
-  }
-
   private void reweight(double exponent) {
     double[] residual = new double[velocity.length];
+    Powers powers = powers(exponent + 1);
     for (int j = 0; j < residual.length; j++) {
-      residual[j] = shape(j, exponent);
+      residual[j] = (powers.upper[j] - powers.lower[j]) / (upper[j] - lower[j]);
     }
     for (int c = 0; c < columns; c++) {
       double amplitude = amplitude(c, residual);
@@ -232,6 +281,4 @@ public final class ColumnFit {
     }
     return all > 0 ? reversing / all : 0;
   }
-
-  private static final int BLOCK = 20;
 }

@@ -11,4 +11,9 @@ final class ConstantLaw implements VelocityLaw {
       Column column, Component component, double exponent, double fromM, double toM) {
     return column.velocityMps(component, 0) * (toM - fromM);
   }
+
+  @Override
+  public boolean takesExponent() {
+    return false;
+  }
 }

@@ -147,12 +147,9 @@ public record ExponentFit(
   /** For each block of a pass what the fit explains one step below, at, and one step above. */
   private static double[][] blocks(ColumnFit fit, double exponent) {
     int n = fit.columns();
-    double[][] each = new double[n][3];
+    double[][] each = fit.explainedAround(exponent, STEP);
     double[] pull = new double[n];
     for (int c = 0; c < n; c++) {
-      for (int side = 0; side < 3; side++) {
-        each[c][side] = fit.explained(c, exponent + (side - 1) * STEP);
-      }
       pull[c] = each[c][2] - each[c][0];
     }
     int length = BlockLength.of(pull);

@@ -36,4 +36,9 @@ final class ThreePointLaw implements VelocityLaw {
     slope /= spread;
     return (toM - fromM) * (mean + slope * (0.5 * (fromM + toM) - meanHeight));
   }
+
+  @Override
+  public boolean takesExponent() {
+    return false;
+  }
 }

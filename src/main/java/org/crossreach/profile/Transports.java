@@ -1,12 +1,12 @@
 package org.crossreach.profile;
 
+import java.util.ArrayList;
 import java.util.Arrays;
+import java.util.List;
 import org.crossreach.screen.VelocityRow;
 import org.crossreach.section.Column;
 import org.crossreach.section.Component;
 import org.crossreach.section.Section;
-import org.crossreach.settings.BottomLaw;
-import org.crossreach.settings.TopLaw;
 import org.crossreach.survey.Gaps;
 
 /**
@@ -21,58 +21,122 @@ public final class Transports {
   private static final Zone[] ZONES = Zone.values();
   private static final Component[] COMPONENTS = Component.values();
 
-  private final double[][] values = new double[ZONES.length * COMPONENTS.length][];
-  private final double[][] gaps = new double[COMPONENTS.length][];
+  private final double[][] values;
+  private final double[][] gaps;
   private final boolean[] own;
+
+  /** What flows through one zone by one law: one column of values for each component. */
+  private record Flow(Zone zone, VelocityLaw law, double exponent, double[][] values) {
+
+    static Flow of(Zone zone, VelocityLaw law, double exponent, int size) {
+      return new Flow(zone, law, exponent, missing(size));
+    }
+
+    boolean isBy(Zone wanted, VelocityLaw other, double otherExponent) {
+      return zone == wanted
+          && law.getClass() == other.getClass()
+          && (exponent == otherExponent || !law.takesExponent());
+    }
+
+    void put(Column column, Component component, int ensemble) {
+      values[component.ordinal()][ensemble] =
+          zone == Zone.TOP
+              ? Laws.top(law, column, component, exponent)
+              : Laws.bottom(law, column, component, exponent);
+    }
+  }
 
   /**
    * Integrates every column of a section.
    *
    * @param section the section
-   * @param top law for the water near the surface
-   * @param bottom law for the water near the bed
-   * @param exponent exponent of the power law (1/6 → 0.1667)
+   * @param choice how the unmeasured water is estimated
    */
-  public static Transports of(Section section, TopLaw top, BottomLaw bottom, double exponent) {
-    Transports transports = new Transports(section.size());
-    transports.integrate(section, Laws.of(top), Laws.of(bottom), exponent);
-    transports.fillColumns(section);
-    return transports;
+  public static Transports of(Section section, VerticalChoice choice) {
+    return all(section, List.of(choice)).get(0);
   }
 
-  private Transports(int size) {
-    own = new boolean[size];
-    for (double[][] columns : new double[][][] {values, gaps}) {
-      for (int c = 0; c < columns.length; c++) {
-        columns[c] = new double[size];
-        Arrays.fill(columns[c], Double.NaN);
-      }
+  /**
+   * Integrates every column of a section by several choices, reading each column once and using
+   * each law with each exponent once.
+   *
+   * @param section the section
+   * @param choices how the unmeasured water is estimated
+   * @return as many as there are choices, in their order
+   */
+  public static List<Transports> all(Section section, List<VerticalChoice> choices) {
+    int size = section.size();
+    List<Flow> flows = new ArrayList<>();
+    List<Flow> tops = new ArrayList<>();
+    List<Flow> bottoms = new ArrayList<>();
+    for (VerticalChoice each : choices) {
+      tops.add(flow(flows, Zone.TOP, Laws.of(each.top()), each.exponent(), size));
+      bottoms.add(flow(flows, Zone.BOTTOM, Laws.of(each.bottom()), each.exponent(), size));
     }
-  }
-
-  private void integrate(Section section, VelocityLaw top, VelocityLaw bottom, double exponent) {
+    boolean[] own = new boolean[size];
+    double[][] measured = missing(size);
+    double[][] gaps = missing(size);
     VelocityRow row = section.newRow();
     Column column = section.newColumn();
-    for (int i = 0; i < own.length; i++) {
+    for (int i = 0; i < size; i++) {
       section.read(i, row, column);
       own[i] = column.size() > 0;
-      if (!own[i]) {
-        continue;
-      }
-      for (Component component : COMPONENTS) {
-        double throughGaps = MeasuredZone.throughGaps(column, component);
-        gaps[component.ordinal()][i] = throughGaps;
-        values[index(Zone.TOP, component)][i] = Laws.top(top, column, component, exponent);
-        values[index(Zone.MEASURED, component)][i] =
-            MeasuredZone.throughCells(column, component) + throughGaps;
-        values[index(Zone.BOTTOM, component)][i] = Laws.bottom(bottom, column, component, exponent);
+      for (int c = 0; own[i] && c < COMPONENTS.length; c++) {
+        gaps[c][i] = MeasuredZone.throughGaps(column, COMPONENTS[c]);
+        measured[c][i] = MeasuredZone.throughCells(column, COMPONENTS[c]) + gaps[c][i];
+        for (Flow flow : flows) {
+          flow.put(column, COMPONENTS[c], i);
+        }
       }
     }
+    fillColumns(section, own, measured);
+    for (Flow flow : flows) {
+      fillColumns(section, own, flow.values());
+    }
+    List<Transports> all = new ArrayList<>();
+    for (int choice = 0; choice < choices.size(); choice++) {
+      all.add(
+          new Transports(
+              tops.get(choice).values(), measured, bottoms.get(choice).values(), gaps, own));
+    }
+    return all;
   }
 
-  private void fillColumns(Section section) {
+  private static Flow flow(
+      List<Flow> flows, Zone zone, VelocityLaw law, double exponent, int size) {
+    for (Flow each : flows) {
+      if (each.isBy(zone, law, exponent)) {
+        return each;
+      }
+    }
+    Flow flow = Flow.of(zone, law, exponent, size);
+    flows.add(flow);
+    return flow;
+  }
+
+  private static double[][] missing(int size) {
+    double[][] columns = new double[COMPONENTS.length][size];
+    for (double[] each : columns) {
+      Arrays.fill(each, Double.NaN);
+    }
+    return columns;
+  }
+
+  private Transports(
+      double[][] top, double[][] measured, double[][] bottom, double[][] gaps, boolean[] own) {
+    values = new double[ZONES.length * COMPONENTS.length][];
+    for (Component component : COMPONENTS) {
+      values[index(Zone.TOP, component)] = top[component.ordinal()];
+      values[index(Zone.MEASURED, component)] = measured[component.ordinal()];
+      values[index(Zone.BOTTOM, component)] = bottom[component.ordinal()];
+    }
+    this.gaps = gaps;
+    this.own = own;
+  }
+
+  private static void fillColumns(Section section, boolean[] own, double[][] columns) {
     double[] length = section.track().lengthsM();
-    for (double[] column : values) {
+    for (double[] column : columns) {
       double[] perDepth = new double[own.length];
       for (int i = 0; i < own.length; i++) {
         perDepth[i] = column[i] / section.depthM(i);

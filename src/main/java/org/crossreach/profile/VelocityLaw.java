@@ -22,4 +22,9 @@ public interface VelocityLaw {
    * @param toM upper height (m)
    */
   double transport(Column column, Component component, double exponent, double fromM, double toM);
+
+  /** Whether the exponent of the power law matters to the law. */
+  default boolean takesExponent() {
+    return true;
+  }
 }

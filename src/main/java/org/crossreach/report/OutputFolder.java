@@ -12,8 +12,9 @@ import java.nio.file.StandardCopyOption;
 /**
  * A folder that receives the files of one result.
  *
- * <p>A folder is ours when it is new, empty, or holds a {@code result.json} of ours; any other is
- * left alone. A file appears under its name only when it is complete.
+ * <p>A folder is ours when it is new, empty, or holds a {@code result.json} or {@code
+ * comparison.json} of ours; any other is left alone. A file appears under its name only when it is
+ * complete.
  */
 public final class OutputFolder {
 
@@ -59,13 +60,23 @@ public final class OutputFolder {
         return true;
       }
     }
-    Path mark = folder.resolve(MARK);
-    if (!Files.isRegularFile(mark)) {
+    return holds(folder.resolve(MARK), "\"crossreach-result/")
+        || holds(folder.resolve("comparison.json"), "\"crossreach-comparison/");
+  }
+
+  /**
+   * Whether a file is there and says at its beginning what it is.
+   *
+   * @param file the file
+   * @param format what stands near its beginning, for example {@code "crossreach-settings/}
+   */
+  public static boolean holds(Path file, String format) throws IOException {
+    if (!Files.isRegularFile(file)) {
       return false;
     }
-    try (var stream = Files.newInputStream(mark)) {
+    try (var stream = Files.newInputStream(file)) {
       byte[] head = stream.readNBytes(ENOUGH_TO_KNOW);
-      return new String(head, StandardCharsets.UTF_8).contains("\"crossreach-result/");
+      return new String(head, StandardCharsets.UTF_8).contains(format);
     }
   }
 

@@ -91,4 +91,20 @@ public final class Column {
     System.arraycopy(source.normalMps, from, normalMps, 0, size);
     System.arraycopy(source.alongMps, from, alongMps, 0, size);
   }
+
+  /**
+   * Turns the axes: what was normal to the section becomes the component along a given direction,
+   * what was along it the component to the right of that direction.
+   *
+   * @param normalPart the direction's part normal to the section, of a unit vector
+   * @param alongPart the direction's part along the section, positive to the right bank
+   */
+  public void turnTo(double normalPart, double alongPart) {
+    for (int j = 0; j < size; j++) {
+      double normal = normalMps[j];
+      double along = alongMps[j];
+      normalMps[j] = normalPart * normal + alongPart * along;
+      alongMps[j] = normalPart * along - alongPart * normal;
+    }
+  }
 }

@@ -42,8 +42,8 @@ class ExponentFitTest {
                 .section());
     for (double exponent = 0.03; exponent < 0.8; exponent += 0.031) {
       double sum = 0;
-      for (int c = 0; c < columns.columns(); c++) {
-        sum += columns.explained(c, exponent);
+      for (double[] column : columns.explainedAround(exponent, 0.01)) {
+        sum += column[1];
       }
       assertEquals(sum, columns.explained(exponent), 1e-7 * sum);
     }

@@ -3,6 +3,7 @@ package org.crossreach.report.chart;
 import java.util.List;
 import org.crossreach.agreement.Result;
 import org.crossreach.discharge.PassDischarge;
+import org.crossreach.evidence.Comparison;
 import org.crossreach.report.Units;
 
 /** The list of all pictures: one line for each. */
@@ -56,5 +57,19 @@ public final class Charts {
     return OF_MEASUREMENT.stream()
         .map(each -> each.make(result, units, ChartStyle.standard()))
         .toList();
+  }
+
+  /**
+   * All pictures of a comparison of laws.
+   *
+   * @param comparison what is shown
+   * @param units the reader's units
+   */
+  public static List<Picture> ofComparison(Comparison comparison, Units units) {
+    ChartStyle style = ChartStyle.standard();
+    return List.of(
+        new ProfileDensity(comparison, style),
+        new HiddenCellErrors(comparison, style),
+        new CombinationDots(comparison, units, style));
   }
 }

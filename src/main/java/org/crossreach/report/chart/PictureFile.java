@@ -54,7 +54,7 @@ public record PictureFile(Picture picture, ChartStyle style) {
   }
 
   private double height() {
-    return picture.height(WIDTH - 2 * BORDER) + 2 * BORDER + TITLE;
+    return Math.ceil(picture.height(WIDTH - 2 * BORDER) + 2 * BORDER + TITLE);
   }
 
   private void draw(Graphics2D graphics, double height) {

@@ -1,5 +1,6 @@
 package org.crossreach.report.chart;
 
+import java.util.List;
 import org.crossreach.discharge.PassDischarge;
 import org.crossreach.screen.VelocityRow;
 import org.crossreach.section.Column;
@@ -29,7 +30,23 @@ final class ProfileBins {
   private double meanBottom;
 
   static ProfileBins of(PassDischarge pass) {
+    return of(List.of(pass));
+  }
+
+  /** The cells of several passes together; at least one column has usable cells. */
+  static ProfileBins of(List<PassDischarge> passes) {
     ProfileBins bins = new ProfileBins();
+    int columns = 0;
+    for (PassDischarge each : passes) {
+      columns += bins.add(each);
+    }
+    bins.meanTop /= columns;
+    bins.meanBottom /= columns;
+    return bins;
+  }
+
+  /** Adds the cells of a pass and returns the number of its columns. */
+  private int add(PassDischarge pass) {
     Section section = pass.section();
     VelocityRow row = section.newRow();
     Column column = section.newColumn();
@@ -41,16 +58,13 @@ final class ProfileBins {
       section.read(i, row, column);
       double mean = pass.transports().total(Component.NORMAL, i) / column.depthM();
       for (int j = 0; j < column.size() && mean != 0; j++) {
-        bins.add(
-            column.centreM(j) / column.depthM(), column.velocityMps(Component.NORMAL, j) / mean);
+        add(column.centreM(j) / column.depthM(), column.velocityMps(Component.NORMAL, j) / mean);
       }
-      bins.meanTop += column.upperM(0) / column.depthM();
-      bins.meanBottom += column.lowerM(column.size() - 1) / column.depthM();
+      meanTop += column.upperM(0) / column.depthM();
+      meanBottom += column.lowerM(column.size() - 1) / column.depthM();
       columns++;
     }
-    bins.meanTop /= columns;
-    bins.meanBottom /= columns;
-    return bins;
+    return columns;
   }
 
   private void add(double height, double ratio) {
@@ -72,6 +86,19 @@ final class ProfileBins {
       most = Math.max(most, each);
     }
     return total[layer] > 0 && total[layer] >= FEWEST * most;
+  }
+
+  /**
+   * Number of cells of a layer between two ratios of velocity over column mean, the upper one not
+   * included.
+   */
+  int count(int layer, double from, double to) {
+    int count = 0;
+    int end = Math.min(STEPS, (int) Math.round((to - LOWEST) / STEP));
+    for (int s = Math.max(0, (int) Math.round((from - LOWEST) / STEP)); s < end; s++) {
+      count += counts[layer][s];
+    }
+    return count;
   }
 
   /**

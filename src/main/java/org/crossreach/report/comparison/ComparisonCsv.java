@@ -6,16 +6,30 @@ import java.io.IOException;
 import java.io.OutputStream;
 import java.util.ArrayList;
 import java.util.List;
-import org.crossreach.evidence.Choice;
+import org.crossreach.evidence.CandidateEvidence;
+import org.crossreach.evidence.CombinationResult;
 import org.crossreach.evidence.Comparison;
 import org.crossreach.report.CsvTable;
 
-/** Comparisons as a table: one row for each measurement and choice. */
+/** Comparisons as a table: one row for each measurement and combination. */
 public final class ComparisonCsv {
+
+  /** Name of the file. */
+  public static final String FILE = "combinations.csv";
 
   private ComparisonCsv() {}
 
-  private record Row(Comparison comparison, Choice choice) {}
+  /** A combination with the comparison it stands in. */
+  private record Row(Comparison comparison, CombinationResult result) {
+
+    CandidateEvidence top() {
+      return comparison.evidenceAtTop(result.combination());
+    }
+
+    CandidateEvidence bottom() {
+      return comparison.evidenceAtBottom(result.combination());
+    }
+  }
 
   /**
    * Writes the table.
@@ -26,8 +40,8 @@ public final class ComparisonCsv {
   public static void write(List<Comparison> comparisons, OutputStream target) throws IOException {
     List<Row> rows = new ArrayList<>();
     for (Comparison comparison : comparisons) {
-      for (Choice choice : comparison.choices()) {
-        rows.add(new Row(comparison, choice));
+      for (CombinationResult each : comparison.combinations()) {
+        rows.add(new Row(comparison, each));
       }
     }
     new CsvTable<>(columns()).write(rows, target);
@@ -35,24 +49,33 @@ public final class ComparisonCsv {
 
   private static List<CsvTable.Column<Row>> columns() {
     return List.of(
-        new CsvTable.Column<>("measurement", row -> row.comparison().measurement().id()),
-        new CsvTable.Column<>("top", row -> row.choice().settings().top().key()),
-        new CsvTable.Column<>("bottom", row -> row.choice().settings().bottom().key()),
         new CsvTable.Column<>(
-            "exponent_rule", row -> row.choice().settings().exponent().rule().key()),
+            "measurement", row -> row.comparison.chosen().reduction().measurement().id()),
+        new CsvTable.Column<>("top", row -> row.result.combination().top().key()),
+        new CsvTable.Column<>("bottom", row -> row.result.combination().bottom().key()),
+        new CsvTable.Column<>("exponent_rule", row -> row.result.combination().rule().key()),
         new CsvTable.Column<>(
             "chosen",
-            row -> Boolean.toString(row.choice().settings().equals(row.comparison().settings()))),
-        number("mean_m3s", row -> row.choice().discharge().mean()),
-        number("change_pct", row -> row.choice().changePct()),
-        number("sd_m3s", row -> row.choice().discharge().sd()),
-        number("top_share_pct", row -> row.choice().topSharePct()),
-        number("bottom_share_pct", row -> row.choice().bottomSharePct()),
-        number("top_hidden_bias_pct", row -> row.choice().top().biasPct()),
-        number("top_hidden_standard_error_pct", row -> row.choice().top().standardErrorPct()),
-        number("top_hidden_scatter_pct", row -> row.choice().top().scatterPct()),
-        number("bottom_hidden_bias_pct", row -> row.choice().bottom().biasPct()),
-        number("bottom_hidden_standard_error_pct", row -> row.choice().bottom().standardErrorPct()),
-        number("bottom_hidden_scatter_pct", row -> row.choice().bottom().scatterPct()));
+            row ->
+                Boolean.toString(
+                    row.result.combination().equals(row.comparison.chosenCombination()))),
+        new CsvTable.Column<>(
+            "favoured",
+            row ->
+                Boolean.toString(
+                    row.result.combination().equals(row.comparison.verdict().combination()))),
+        number("mean_m3s", row -> row.result.dischargeM3s().mean()),
+        number("change_pct", row -> row.result.changePct()),
+        number("sd_m3s", row -> row.result.dischargeM3s().sd()),
+        number("cov_pct", row -> row.result.dischargeM3s().covPct()),
+        number("top_share_pct", row -> row.result.topPct()),
+        number("bottom_share_pct", row -> row.result.bottomPct()),
+        number("top_bias_pct", row -> row.top().biasPct()),
+        number("top_half95_pct", row -> row.top().half95Pct()),
+        number("top_scatter_pct", row -> row.top().scatterPct()),
+        number("bottom_bias_pct", row -> row.bottom().biasPct()),
+        number("bottom_half95_pct", row -> row.bottom().half95Pct()),
+        number("bottom_scatter_pct", row -> row.bottom().scatterPct()),
+        number("expected_error_pct", row -> row.result.expectedErrorPct()));
   }
 }

@@ -2,58 +2,57 @@ package org.crossreach.report.comparison;
 
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Locale;
-import org.crossreach.discharge.Exponents;
-import org.crossreach.discharge.PassDischarge;
-import org.crossreach.evidence.Choice;
+import org.crossreach.evidence.CandidateEvidence;
+import org.crossreach.evidence.Combination;
+import org.crossreach.evidence.CombinationResult;
 import org.crossreach.evidence.Comparison;
-import org.crossreach.evidence.Prediction;
+import org.crossreach.evidence.PassEvidence;
+import org.crossreach.evidence.ZoneEvidence;
+import org.crossreach.profile.ExponentFit;
 import org.crossreach.report.Decimals;
 import org.crossreach.report.Quantity;
 import org.crossreach.report.TextTable;
 import org.crossreach.report.TextWrap;
 import org.crossreach.report.Units;
-import org.crossreach.settings.ExponentRule;
 
 /**
- * Every choice on one screen of 80 columns, with the evidence for each and what follows.
+ * A comparison of laws on a terminal of 80 columns: the verdict first, every combination, then the
+ * evidence by zone and by pass.
  *
- * @param comparison the comparison
+ * @param comparison what is shown
  * @param units the reader's units
  */
 public record ComparisonText(Comparison comparison, Units units) {
 
   private static final int WIDTH = 80;
+  private static final Decimals ONE = new Decimals(1);
+  private static final Decimals TWO = new Decimals(2);
+  private static final Decimals FOUR = new Decimals(4);
 
   /** The text, lines ending with LF. */
   public String text() {
     List<String> lines = new ArrayList<>();
     lines.add(
-        comparison.measurement().id()
-            + ": mean discharge in "
-            + Quantity.DISCHARGE.symbol(units)
-            + " under every choice of extrapolation");
+        comparison.chosen().reduction().measurement().id()
+            + ": every choice for the unmeasured water, discharge in "
+            + Quantity.DISCHARGE.symbol(units));
     lines.add("");
-    lines.addAll(choices());
+    lines.addAll(combinations());
     lines.add("");
-    lines.addAll(
-        TextWrap.lines(
-            "> is the choice of the settings. top% and bottom% are shares of the discharge; hidden% is"
-                + " the error of the law, bias ± standard error, in % of what was"
-                + " measured through cells that were hidden from it.",
-            WIDTH, ""));
+    lines.addAll(evidence());
     lines.add("");
     lines.addAll(passes());
     lines.add("");
-    for (String sentence :
-        List.of(
-            comparison.top().sentence(), comparison.bottom().sentence(), comparison.conclusion())) {
-      lines.addAll(TextWrap.lines(sentence, WIDTH, "  "));
-    }
+    lines.addAll(TextWrap.lines(comparison.verdict().sentence(), WIDTH, ""));
     return String.join("\n", lines) + "\n";
   }
 
-  private List<String> choices() {
+  private List<String> combinations() {
+    double[] means =
+        comparison.combinations().stream()
+            .mapToDouble(each -> Quantity.DISCHARGE.in(units, each.dischargeM3s().mean()))
+            .toArray();
+    Decimals decimals = Decimals.showing(4, means);
     TextTable table = new TextTable(3, 1);
     table.row(
         "  top",
@@ -64,101 +63,127 @@ public record ComparisonText(Comparison comparison, Units units) {
         "sd%",
         "top%",
         "hidden%",
-        "bottom%",
+        "bed%",
         "hidden%");
     table.rule();
-    double[] means =
-        comparison.choices().stream().mapToDouble(each -> each.discharge().mean()).toArray();
-    Decimals decimals = Decimals.showing(4, means);
-    for (Choice each : comparison.choices()) {
+    for (CombinationResult each : comparison.combinations()) {
+      Combination combination = each.combination();
       table.row(
-          (each.settings().equals(comparison.settings()) ? "> " : "  ")
-              + each.settings().top().key(),
-          each.settings().bottom().key(),
-          each.settings().exponent().rule().key(),
-          decimals.of(Quantity.DISCHARGE.in(units, each.discharge().mean())),
-          new Decimals(2).signed(each.changePct()),
-          new Decimals(1).of(each.discharge().covPct()),
-          new Decimals(0).of(each.topSharePct()),
-          error(each.top()),
-          new Decimals(0).of(each.bottomSharePct()),
-          error(each.bottom()));
+          mark(combination) + " " + combination.top().key(),
+          combination.bottom().key(),
+          combination.rule().key(),
+          decimals.of(Quantity.DISCHARGE.in(units, each.dischargeM3s().mean())),
+          TWO.signed(each.changePct()),
+          TWO.of(each.dischargeM3s().covPct()),
+          ONE.of(each.topPct()),
+          bias(comparison.evidenceAtTop(combination)),
+          ONE.of(each.bottomPct()),
+          bias(comparison.evidenceAtBottom(combination)));
     }
-    return table.lines();
+    List<String> lines = new ArrayList<>(table.lines());
+    lines.add("* chosen, > favoured. top%, bed%: shares of the discharge; hidden%: see below");
+    return lines;
   }
 
-  private static String error(Prediction prediction) {
-    return Double.isFinite(prediction.biasPct())
-        ? new Decimals(1).signed(prediction.biasPct())
-            + "±"
-            + new Decimals(1).of(prediction.standardErrorPct())
+  private static String bias(CandidateEvidence evidence) {
+    return Double.isFinite(evidence.biasPct())
+        ? ONE.signed(evidence.biasPct()) + "±" + ONE.of(evidence.half95Pct())
         : Decimals.NONE;
   }
 
-  /** For each pass the fitted exponent and how the chosen laws predict its hidden cells. */
+  private String mark(Combination combination) {
+    boolean chosen = combination.equals(comparison.chosenCombination());
+    return switch (comparison.verdict().kind()) {
+      case CHANGE -> combination.equals(comparison.verdict().combination()) ? ">" : star(chosen);
+      case KEEP, CANNOT_TELL -> star(chosen);
+    };
+  }
+
+  private static String star(boolean chosen) {
+    return chosen ? "*" : " ";
+  }
+
+  private List<String> evidence() {
+    List<String> lines = new ArrayList<>();
+    lines.addAll(
+        TextWrap.lines(
+            "Cells hidden from the laws in "
+                + comparison.columns()
+                + " columns: prediction minus measurement, ± 95 %, scatter of a column, in % of"
+                + " what was measured there; = cannot be told from the best",
+            WIDTH,
+            ""));
+    lines.add(beside("near the surface", "near the bed"));
+    List<CandidateEvidence> top = comparison.top().ranked();
+    List<CandidateEvidence> bottom = comparison.bottom().ranked();
+    for (int r = 0; r < Math.max(top.size(), bottom.size()); r++) {
+      lines.add(beside(entry(top, r), entry(bottom, r)));
+    }
+    return lines;
+  }
+
+  private static String beside(String left, String right) {
+    return (left + " ".repeat(Math.max(1, WIDTH / 2 - left.length())) + right).stripTrailing();
+  }
+
+  private static String entry(List<CandidateEvidence> ranked, int r) {
+    if (r >= ranked.size()) {
+      return "";
+    }
+    CandidateEvidence each = ranked.get(r);
+    String name = (each.equal() ? "= " : "  ") + each.candidate().text();
+    return name
+        + " ".repeat(Math.max(1, 19 - name.length()))
+        + right(bias(each), 10)
+        + right(ONE.of(each.scatterPct()), 7);
+  }
+
+  private static String right(String text, int width) {
+    return " ".repeat(Math.max(0, width - text.length())) + text;
+  }
+
   private List<String> passes() {
     TextTable table = new TextTable(1);
-    table.row("pass", "total", "fitted exponent", "top hidden", "bottom hidden");
+    table.row("pass", "exponent", "95 % interval", "columns", "top", "bottom");
     table.rule();
-    Choice chosen = comparison.chosen();
-    List<PassDischarge> passes = chosen.result().reduction().passes();
-    double[] totals = passes.stream().mapToDouble(PassDischarge::totalM3s).toArray();
-    Decimals decimals = Decimals.showing(4, totals);
-    for (int p = 0; p < passes.size(); p++) {
+    for (PassEvidence each : comparison.passes()) {
       table.row(
-          passes.get(p).pass().name(),
-          decimals.of(Quantity.DISCHARGE.in(units, passes.get(p).totalM3s())),
-          exponent(comparison.exponents().get(ExponentRule.FIT_PASS).passes().get(p)),
-          bias(chosen.top().passBiasPct().get(p)),
-          bias(chosen.bottom().passBiasPct().get(p)));
+          each.pass() + (each.used() ? "" : " (not used)"),
+          value(each.exponent()),
+          interval(each.exponent()),
+          Integer.toString(each.columns()),
+          law(each.top()),
+          law(each.bottom()));
     }
+    table.rule();
+    ExponentFit all = comparison.exponent();
     table.row(
-        "all used",
-        decimals.of(Quantity.DISCHARGE.in(units, chosen.discharge().mean())),
-        exponent(comparison.exponents().get(ExponentRule.FIT_ALL).passes().get(0)),
-        bias(chosen.top().biasPct()),
-        bias(chosen.bottom().biasPct()));
-    return table.lines();
+        "together",
+        value(all),
+        interval(all),
+        Integer.toString(comparison.columns()),
+        law(comparison.top()),
+        law(comparison.bottom()));
+    List<String> lines = new ArrayList<>(table.lines());
+    all.refusal()
+        .ifPresent(
+            why ->
+                lines.addAll(
+                    TextWrap.lines("The exponent cannot be fitted: " + why + ".", WIDTH, "")));
+    return lines;
   }
 
-  private static String bias(double percent) {
-    return Double.isFinite(percent) ? new Decimals(1).signed(percent) + " %" : Decimals.NONE;
+  private static String interval(ExponentFit fit) {
+    return fit.refusal().isEmpty()
+        ? FOUR.of(fit.low95()) + " to " + FOUR.of(fit.high95())
+        : Decimals.NONE;
   }
 
-  private static String exponent(Exponents.Chosen chosen) {
-    return chosen
-        .fit()
-        .map(
-            fit ->
-                String.format(
-                    Locale.ROOT, "%.4f ± %.4f", fit.value(), (fit.high95() - fit.low95()) / 2))
-        .orElse("cannot tell");
+  private static String value(ExponentFit fit) {
+    return fit.refusal().isEmpty() ? FOUR.of(fit.value()) : "cannot tell";
   }
 
-  /** Several measurements side by side: the choice that the evidence favours for each. */
-  public static String sideBySide(List<Comparison> comparisons) {
-    TextTable table = new TextTable(5);
-    table.row("measurement", "top", "bottom", "exponent", "evidence", "change");
-    table.rule();
-    List<String> laws = new ArrayList<>();
-    for (Comparison each : comparisons) {
-      Choice favoured = each.favoured();
-      String law = favoured.settings().top().key() + "/" + favoured.settings().bottom().key();
-      if (!laws.contains(law)) {
-        laws.add(law);
-      }
-      table.row(
-          each.measurement().id(),
-          favoured.settings().top().key(),
-          favoured.settings().bottom().key(),
-          favoured.settings().exponent().rule().key(),
-          each.top().finding().name().toLowerCase(Locale.ROOT).replace('_', '-'),
-          new Decimals(2).signed(favoured.changePct()) + " %");
-    }
-    String conclusion =
-        laws.size() == 1
-            ? "All of them take the same laws, top/bottom " + laws.get(0) + "."
-            : "They do not all take the same laws, top/bottom: " + String.join(", ", laws) + ".";
-    return String.join("\n", table.lines()) + "\n\n" + conclusion + "\n";
+  private static String law(ZoneEvidence zone) {
+    return zone.law().orElse("cannot tell");
   }
 }

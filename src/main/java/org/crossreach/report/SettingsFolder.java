@@ -1,0 +1,44 @@
+package org.crossreach.report;
+
+import java.io.BufferedOutputStream;
+import java.io.IOException;
+import java.io.OutputStream;
+import java.nio.file.FileSystemException;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.nio.file.StandardCopyOption;
+import org.crossreach.settings.Settings;
+
+/** Writes the settings of a measurement into its folder, whole or not at all. */
+public final class SettingsFolder {
+
+  private static final String FILE = "settings.json";
+
+  private SettingsFolder() {}
+
+  /**
+   * Writes {@code settings.json}.
+   *
+   * @param settings the choices
+   * @param folder the folder of the measurement
+   * @return the path of the file
+   * @throws FileSystemException when there is a file of this name that is not one of settings
+   */
+  public static Path write(Settings settings, Path folder) throws IOException {
+    Path target = folder.resolve(FILE);
+    if (Files.exists(target) && !OutputFolder.holds(target, "\"crossreach-settings/")) {
+      throw new FileSystemException(
+          target.toString(), null, "this file does not hold settings of crossreach; move it away");
+    }
+    Path unfinished = folder.resolve("." + FILE + "." + ProcessHandle.current().pid() + ".part");
+    try {
+      try (OutputStream stream = new BufferedOutputStream(Files.newOutputStream(unfinished))) {
+        SettingsJson.write(settings, stream);
+      }
+      return Files.move(
+          unfinished, target, StandardCopyOption.ATOMIC_MOVE, StandardCopyOption.REPLACE_EXISTING);
+    } finally {
+      Files.deleteIfExists(unfinished);
+    }
+  }
+}
