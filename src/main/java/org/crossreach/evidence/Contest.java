@@ -21,9 +21,10 @@ record Contest(List<Integer> order, int equals) {
    *
    * @param error size of each contestant's error, at least 0
    * @param drawn the same in each resample: {@code drawn[resample][contestant]}
+   * @param negligible how much larger an error may be and still count as equal, in its unit
    * @param preference which of two equals is taken: the one with the smaller number
    */
-  static Contest of(double[] error, double[][] drawn, double[] preference) {
+  static Contest of(double[] error, double[][] drawn, double negligible, double[] preference) {
     int n = error.length;
     int first = 0;
     for (int k = 1; k < n; k++) {
@@ -36,7 +37,8 @@ record Contest(List<Integer> order, int equals) {
       for (double[] each : drawn) {
         larger += each[k] > each[first] ? 1 : 0;
       }
-      (larger > CERTAIN * drawn.length ? worse : equals).add(k);
+      boolean isWorse = larger > CERTAIN * drawn.length && error[k] > error[first] + negligible;
+      (isWorse ? worse : equals).add(k);
     }
     equals.sort((a, b) -> Double.compare(preference[a], preference[b]));
     worse.sort((a, b) -> Double.compare(error[a], error[b]));

@@ -20,6 +20,9 @@ record Judge(
     ZoneEvidence bottom,
     Combination chosen) {
 
+  /** An error of the discharge that is larger by no more than this (%) is no worse. */
+  private static final double NEGLIGIBLE_PCT = 0.05;
+
   /** Error of the discharge (%) from the biases of the zones (%) and their shares (%). */
   static double error(double topBias, double topShare, double bottomBias, double bottomShare) {
     return (Math.abs(topBias) * topShare + Math.abs(bottomBias) * bottomShare) / 100;
@@ -74,7 +77,7 @@ record Judge(
                       resamples.scatterPct(atBottom),
                       each.bottomPct());
     }
-    return Contest.of(error, drawn, preference);
+    return Contest.of(error, drawn, NEGLIGIBLE_PCT, preference);
   }
 
   private int index(Combination combination) {

@@ -15,6 +15,9 @@ import org.crossreach.profile.Zone;
  */
 public record ZoneEvidence(Zone zone, List<CandidateEvidence> ranked, Optional<String> law) {
 
+  /** A bias that is larger by no more than this (% of the zone) is no worse. */
+  private static final double NEGLIGIBLE_PCT = 0.2;
+
   public ZoneEvidence {
     ranked = List.copyOf(ranked);
   }
@@ -54,7 +57,7 @@ public record ZoneEvidence(Zone zone, List<CandidateEvidence> ranked, Optional<S
         drawn[r][k] = Math.abs(resamples.biasPct(members.get(k), r));
       }
     }
-    Contest contest = Contest.of(error, drawn, scatter);
+    Contest contest = Contest.of(error, drawn, NEGLIGIBLE_PCT, scatter);
     List<CandidateEvidence> ranked = new ArrayList<>();
     for (int k : contest.order()) {
       int t = members.get(k);

@@ -32,11 +32,11 @@ class CompareTest {
     Run run = Run.of("compare", SAMPLE.toString());
     assertEquals(ExitCode.DONE, run.code());
     List<String> lines = run.out().lines().toList();
-    assertTrue(lines.size() <= 45, lines.size() + " lines");
+    assertTrue(lines.size() <= 48, lines.size() + " lines");
     for (String line : lines) {
       assertTrue(line.length() <= 80, line);
     }
-    assertEquals(1, lines.stream().filter(line -> line.startsWith("> power")).count());
+    assertEquals(1, lines.stream().filter(line -> line.startsWith("* power")).count());
   }
 
   @Test
@@ -65,6 +65,39 @@ class CompareTest {
   @Test
   void putsSeveralMeasurementsSideBySide() {
     Run run = Run.of("compare", SAMPLE.toString(), "sample-transects/tern-landing-0418");
-    assertTrue(run.out().contains("All of them take the same laws, top/bottom power/power."));
+    assertTrue(run.out().contains("all that can tell need the same law, power"));
+  }
+
+  @Test
+  void leavesASettingsFileAloneThatIsNotOurs() throws Exception {
+    Path settings = copy().resolve("settings.json");
+    Run first = Run.of("compare", folder.toString(), "--write-settings");
+    assertEquals(ExitCode.DONE, first.code(), first.err());
+    Files.writeString(settings, "{\"mine\": true}");
+    Run run = Run.of("compare", folder.toString(), "--write-settings");
+    assertEquals(ExitCode.UNREADABLE_INPUT, run.code());
+    assertEquals("{\"mine\": true}", Files.readString(settings));
+  }
+
+  @Test
+  void writesFilesWhereAsked() {
+    Path out = folder.resolve("out");
+    Run run =
+        Run.of("compare", SAMPLE.toString(), "--write", "csv,png,svg", "--out", out.toString());
+    assertEquals(ExitCode.DONE, run.code(), run.err());
+    Path target = out.resolve("heron-weir-0903");
+    for (String name :
+        List.of(
+            "comparison.json",
+            "combinations.csv",
+            "profile-density.png",
+            "hidden-cells.svg",
+            "combinations.png")) {
+      assertTrue(Files.exists(target.resolve(name)), name);
+    }
+    assertEquals(
+        ExitCode.DONE, Run.of("compare", SAMPLE.toString(), "--out", out.toString()).code());
+    Run pdf = Run.of("compare", SAMPLE.toString(), "--write", "pdf");
+    assertEquals(ExitCode.WRONG_USAGE, pdf.code());
   }
 }

@@ -35,6 +35,7 @@ final class Format {
                       HOME + "measurement.schema.json", text("measurement.schema.json"),
                       HOME + "settings.schema.json", text("settings.schema.json"),
                       HOME + "result.schema.json", text("result.schema.json"),
+                      HOME + "comparison.schema.json", text("comparison.schema.json"),
                       HOME + "check.schema.json", text("check.schema.json"))));
 
   private Format() {}

@@ -70,7 +70,7 @@ public record ProfileDensity(Comparison comparison, ChartStyle style) implements
     Plane plane =
         new PlotFrame(style, velocities, heights, MARGINS)
             .add((g, p) -> density(g, p, bins))
-            .add((g, p) -> laws(g, p, bins))
+            .add((g, p) -> lawsIn(g, p, bins))
             .draw(graphics, area);
     key(graphics, plane, area.getMaxY() - 4);
   }
@@ -104,6 +104,17 @@ public record ProfileDensity(Comparison comparison, ChartStyle style) implements
   private static int count(ProfileBins bins, Plane plane, int layer, int t, double tile) {
     double from = plane.across().from() + t * tile;
     return bins.count(layer, from, from + tile);
+  }
+
+  /** Standing water has no profile for a law to follow. */
+  private void lawsIn(Graphics2D graphics, Plane plane, ProfileBins bins) {
+    boolean any = false;
+    for (int layer = 0; layer < ProfileBins.LAYERS; layer++) {
+      any |= bins.filled(layer);
+    }
+    if (any) {
+      laws(graphics, plane, bins);
+    }
   }
 
   private void laws(Graphics2D graphics, Plane plane, ProfileBins bins) {

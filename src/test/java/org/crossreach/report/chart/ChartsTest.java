@@ -8,11 +8,13 @@ import java.io.ByteArrayInputStream;
 import java.nio.charset.StandardCharsets;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Set;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
 import java.util.stream.Stream;
 import javax.xml.parsers.DocumentBuilderFactory;
 import org.crossreach.agreement.Result;
+import org.crossreach.evidence.Comparer;
 import org.crossreach.report.Units;
 import org.crossreach.settings.BottomLaw;
 import org.crossreach.settings.Settings;
@@ -31,6 +33,9 @@ class ChartsTest {
   private static final Pattern FONT = Pattern.compile("font-family: \"([^\"]*)\"");
   private static final Pattern TEXT = Pattern.compile("<text[^>]*>([^<]*)</text>");
 
+  /** Pictures whose rows have names, so that one axis is enough. */
+  private static final Set<String> ROWS = Set.of("passes", "hidden-cells", "combinations");
+
   private static Stream<River> oddRivers() {
     return Stream.of(
         River.usual(),
@@ -43,8 +48,13 @@ class ChartsTest {
         /* a torrent */ new River(120, 24, 0, 40));
   }
 
-  private static List<Picture> pictures(Result result, Units units) {
+  private static List<Picture> pictures(Result result, Units units) throws Exception {
     List<Picture> all = new ArrayList<>(Charts.ofMeasurement(result, units));
+    all.addAll(
+        Charts.ofComparison(
+            new Comparer(1)
+                .compare(result.reduction().measurement(), result.reduction().settings()),
+            units));
     for (var pass : result.reduction().passes()) {
       all.addAll(Charts.ofPass(result, pass, units));
     }
@@ -117,7 +127,7 @@ class ChartsTest {
       for (Picture picture : pictures(result, units)) {
         List<String> texts = texts(svg(picture));
         long axes = texts.stream().filter(text -> text.matches(".+ \\([^)]+\\)")).count();
-        assertTrue(axes >= (picture instanceof PassDots ? 1 : 2), picture.name() + ": " + texts);
+        assertTrue(axes >= (ROWS.contains(picture.name()) ? 1 : 2), picture.name() + ": " + texts);
         if (picture instanceof VelocitySection) {
           assertTrue(texts.contains("Depth below the surface " + length), texts.toString());
           assertTrue(texts.contains("Distance from the left bank " + length), texts.toString());
