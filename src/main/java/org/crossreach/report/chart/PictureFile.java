@@ -26,16 +26,17 @@ public record PictureFile(Picture picture, ChartStyle style) {
     this(picture, ChartStyle.standard());
   }
 
-  /** The picture as SVG; its text stays text in the typeface Roboto, or a plain one without it. */
+  /** The picture as SVG; its text stays text, and the letters that it needs are inside. */
   public byte[] svg() {
     double height = height();
     SVGGraphics2D graphics = new SVGGraphics2D(WIDTH, height);
     graphics.setDefsKeyPrefix(picture.name() + "-");
     graphics.setGeomDoubleConverter(new Decimals(3)::of);
     graphics.setTransformDoubleConverter(new Decimals(6)::of);
-    graphics.setFontFunction(family -> "\"" + family + "\", Roboto, sans-serif");
+    graphics.setFontFunction(
+        family -> "\"" + family + "\", Roboto, Arial, \"Liberation Sans\", sans-serif");
     draw(graphics, height);
-    return graphics.getSVGElement().getBytes(StandardCharsets.UTF_8);
+    return SvgFonts.embedded(graphics.getSVGElement()).getBytes(StandardCharsets.UTF_8);
   }
 
   /** The picture as PNG, twice as fine as a screen of 72 dots per inch. */
@@ -58,8 +59,10 @@ public record PictureFile(Picture picture, ChartStyle style) {
   }
 
   private void draw(Graphics2D graphics, double height) {
+    PlotFrame.smooth(graphics);
     graphics.setPaint(style.paper());
-    graphics.fill(new Rectangle2D.Double(0, 0, WIDTH, height));
+    // A point more, since a picture may end inside a pixel.
+    graphics.fill(new Rectangle2D.Double(0, 0, WIDTH + 1, height + 1));
     Label.left(style.title(), style.ink()).draw(graphics, picture.title(), BORDER, BORDER + 9);
     picture.draw(
         graphics,

@@ -68,12 +68,7 @@ final class PlotFrame {
             area.getY() + margins.above(),
             area.getWidth() - margins.left() - margins.right(),
             area.getHeight() - margins.above() - margins.below());
-    graphics.setRenderingHint(RenderingHints.KEY_ANTIALIASING, RenderingHints.VALUE_ANTIALIAS_ON);
-    graphics.setRenderingHint(
-        RenderingHints.KEY_TEXT_ANTIALIASING, RenderingHints.VALUE_TEXT_ANTIALIAS_ON);
-    graphics.setRenderingHint(
-        RenderingHints.KEY_FRACTIONALMETRICS, RenderingHints.VALUE_FRACTIONALMETRICS_ON);
-    graphics.setRenderingHint(RenderingHints.KEY_STROKE_CONTROL, RenderingHints.VALUE_STROKE_PURE);
+    smooth(graphics);
     Plane plane = new Plane(inner, across, up);
     plot(plane).draw(graphics, area, null, null, null);
     // Once more, over what the layers may have laid on them.
@@ -90,6 +85,16 @@ final class PlotFrame {
     Label.right(style.label(), style.ink())
         .draw(graphics, across.label(), inner.getMaxX(), inner.getMaxY() + 20);
     return plane;
+  }
+
+  /** Draws lines and letters smooth, and as wide as they are. */
+  static void smooth(Graphics2D graphics) {
+    graphics.setRenderingHint(RenderingHints.KEY_ANTIALIASING, RenderingHints.VALUE_ANTIALIAS_ON);
+    graphics.setRenderingHint(
+        RenderingHints.KEY_TEXT_ANTIALIASING, RenderingHints.VALUE_TEXT_ANTIALIAS_ON);
+    graphics.setRenderingHint(
+        RenderingHints.KEY_FRACTIONALMETRICS, RenderingHints.VALUE_FRACTIONALMETRICS_ON);
+    graphics.setRenderingHint(RenderingHints.KEY_STROKE_CONTROL, RenderingHints.VALUE_STROKE_PURE);
   }
 
   private XYPlot plot(Plane plane) {

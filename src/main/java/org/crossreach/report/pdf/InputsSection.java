@@ -45,7 +45,7 @@ final class InputsSection implements TransectSection, MeasurementSection {
       table.row(file.attachment().name(), "inside this PDF", file.sha256());
     }
     for (Packed file : subject.attachments().beside()) {
-      table.row(file.attachment().name(), "beside this PDF", file.sha256());
+      table.row(file.attachment().name(), "too large to be inside", file.sha256());
     }
     List<Block> blocks = new ArrayList<>();
     blocks.add(style.section("Files"));

@@ -64,7 +64,7 @@ class ChartsTest {
   /** The picture as SVG, without the letters that stand for its pixels. */
   private static String svg(Picture picture) {
     return new String(new PictureFile(picture, STYLE).svg(), StandardCharsets.UTF_8)
-        .replaceAll("base64,[^']*'", "'");
+        .replaceAll("base64,[A-Za-z0-9+/=]*", "");
   }
 
   @ParameterizedTest

@@ -4,11 +4,15 @@ import static org.junit.jupiter.api.Assertions.assertArrayEquals;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import java.awt.Font;
 import java.awt.image.BufferedImage;
 import java.io.ByteArrayInputStream;
 import java.nio.charset.StandardCharsets;
+import java.util.Base64;
 import java.util.Locale;
 import java.util.TimeZone;
+import java.util.regex.Matcher;
+import java.util.regex.Pattern;
 import javax.imageio.ImageIO;
 import org.crossreach.agreement.Result;
 import org.crossreach.report.Units;
@@ -51,6 +55,24 @@ class PictureFileTest {
     String svg = new String(file().svg(), StandardCharsets.UTF_8);
     assertTrue(svg.contains(">Velocity normal to the section<"));
     assertTrue(svg.contains(">Normal velocity (m/s)<"));
+  }
+
+  @Test
+  void carriesTheLettersThatItUses() throws Exception {
+    String svg = new String(file().svg(), StandardCharsets.UTF_8);
+    Matcher fonts =
+        Pattern.compile("font-family:\"([^\"]+)\";src:url\\(data:font/ttf;base64,([^)]+)\\)")
+            .matcher(svg);
+    int count = 0;
+    while (fonts.find()) {
+      byte[] font = Base64.getDecoder().decode(fonts.group(2));
+      Font read = Font.createFont(Font.TRUETYPE_FONT, new ByteArrayInputStream(font));
+      assertEquals(fonts.group(1), read.getFamily());
+      assertEquals(-1, read.canDisplayUpTo("elocity"));
+      count++;
+    }
+    assertEquals(2, count, "regular text and a title");
+    assertTrue(svg.length() < 150_000, svg.length() + " characters");
   }
 
   @Test

@@ -189,7 +189,7 @@ class TransectPdfTest {
     byte[] pdf = pdf(PdfOptions.defaults().withAttachments(List.of(large)));
     assertTrue(pdf.length < 200_000);
     String text = PdfText.byEveryReader(pdf).get(0);
-    assertTrue(text.contains("beside this PDF"), text);
+    assertTrue(text.contains("too large to be inside"), text);
     assertTrue(text.contains(Packed.of(large).sha256()), text);
     assertEquals(List.of(), Verdict.faults(pdf, PDFAFlavour.PDFA_2_U));
   }
