@@ -21,7 +21,6 @@ final class Rehearsal {
     rehearse("--help");
     rehearse("reduce", sample);
     rehearse("reduce", sample, "--json");
-    rehearse("compare", sample);
     rehearse("check", sample);
     rehearse("check", sample, "--json");
     rehearse("compare", sample);

@@ -59,7 +59,7 @@ public record Exponents(List<Chosen> passes) {
   public static Exponents of(LaidMeasurement laid, Exponent exponent, int threads) {
     return switch (exponent.rule()) {
       case FIXED -> fixed(laid, exponent.value());
-      case FIT_PASS -> fitted(passFits(columns(laid, threads)), exponent.value());
+      case FIT_PASS -> fitted(passFits(columns(laid, threads), threads), exponent.value());
       case FIT_ALL ->
           fitted(
               Collections.nCopies(laid.passes().size(), fitToAll(laid, columns(laid, threads))),
@@ -73,8 +73,8 @@ public record Exponents(List<Chosen> passes) {
   }
 
   /** A fit to each pass alone. */
-  public static List<ExponentFit> passFits(List<ColumnFit> columns) {
-    return columns.stream().map(each -> ExponentFit.of(List.of(each))).toList();
+  public static List<ExponentFit> passFits(List<ColumnFit> columns, int threads) {
+    return Workers.map(columns, threads, each -> ExponentFit.of(List.of(each)));
   }
 
   /** A fit to all used passes together. */

@@ -50,7 +50,7 @@ public record Comparer(int threads) {
     Reducer reducer = new Reducer(threads);
     LaidMeasurement laid = reducer.lay(measurement, settings);
     List<ColumnFit> columns = Exponents.columns(laid, threads);
-    Fits fits = new Fits(Exponents.passFits(columns), Exponents.fitToAll(laid, columns));
+    Fits fits = new Fits(Exponents.passFits(columns, threads), Exponents.fitToAll(laid, columns));
     Map<ExponentRule, Exponents> exponents = fits.exponents(laid, settings.exponent().value());
     List<Combination> combinations = Combination.all();
     List<Reduction> reductions =

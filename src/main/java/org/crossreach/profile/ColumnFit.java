@@ -23,7 +23,7 @@ public final class ColumnFit {
   static final int FEWEST_CELLS = 4;
 
   /** Most columns that are looked at; of a longer pass every n-th, evenly spread. */
-  private static final int MOST_COLUMNS = 2000;
+  private static final int MOST_COLUMNS = 1000;
 
   /** Lowest exponent that is searched. */
   static final double LOWEST = 0.01;
@@ -63,6 +63,7 @@ public final class ColumnFit {
   private Powers step;
   private final FlowDirection direction;
   private final double[] total = new double[NODES];
+  private double[][] byColumn;
 
   /** A power of the edges of every cell; cells that touch share one. */
   private record Powers(double[] upper, double[] lower) {}
@@ -82,10 +83,10 @@ public final class ColumnFit {
    * @param section the pass on its line
    */
   public static ColumnFit of(Section section) {
-    FlowDirection direction = FlowDirection.of(section);
     VelocityRow row = section.newRow();
     Column column = section.newColumn();
     int step = 1 + (section.size() - 1) / MOST_COLUMNS;
+    FlowDirection direction = FlowDirection.of(section, step);
     ColumnFit fit =
         new ColumnFit(1 + (section.size() - 1) / step, section.pass().maxCells(), direction);
     for (int i = 0; i < section.size(); i += step) {
@@ -121,6 +122,7 @@ public final class ColumnFit {
     Arrays.fill(weight, 1);
     base = powers(LOWEST + 1);
     step = powers(STEP);
+    byColumn = new double[columns][NODES];
     sumUp();
     double before = Double.NaN;
     for (int r = 0; r < MOST_REWEIGHTINGS && columns > 0; r++) {
@@ -158,18 +160,33 @@ public final class ColumnFit {
 
   /** What the model explains of the weighted squares of all columns (m²/s²), interpolated. */
   double explained(double exponent) {
-    double place = (exponent - LOWEST) / STEP;
-    int first =
-        Math.max(0, Math.min(NODES - NEIGHBOURS, (int) Math.floor(place) - NEIGHBOURS / 2 + 1));
-    double sum = 0;
-    for (int k = first; k < first + NEIGHBOURS; k++) {
-      double factor = total[k];
-      for (int other = first; other < first + NEIGHBOURS; other++) {
-        factor *= other == k ? 1 : (place - other) / (k - other);
+    return new Interpolation(exponent).of(total);
+  }
+
+  /** Lagrange's polynomial through the values at the nodes around an exponent. */
+  private static final class Interpolation {
+    private final int first;
+    private final double[] factor = new double[NEIGHBOURS];
+
+    Interpolation(double exponent) {
+      double place = (exponent - LOWEST) / STEP;
+      first =
+          Math.max(0, Math.min(NODES - NEIGHBOURS, (int) Math.floor(place) - NEIGHBOURS / 2 + 1));
+      for (int k = 0; k < NEIGHBOURS; k++) {
+        factor[k] = 1;
+        for (int other = 0; other < NEIGHBOURS; other++) {
+          factor[k] *= other == k ? 1 : (place - first - other) / (k - other);
+        }
       }
-      sum += factor;
     }
-    return sum;
+
+    double of(double[] atNodes) {
+      double sum = 0;
+      for (int k = 0; k < NEIGHBOURS; k++) {
+        sum += factor[k] * atNodes[first + k];
+      }
+      return sum;
+    }
   }
 
   /** Sums at every node; powers step from node to node by a multiplication. */
@@ -193,34 +210,26 @@ public final class ColumnFit {
         }
       }
       for (int k = 0; k < NODES; k++) {
-        total[k] += square[k] > 0 ? product[k] * product[k] / square[k] : 0;
+        byColumn[c][k] = square[k] > 0 ? product[k] * product[k] / square[k] : 0;
+        total[k] += byColumn[c][k];
       }
     }
   }
 
   /**
-   * What the model explains of the weighted squares of each column (m²/s²), for three exponents.
+   * What the model explains of the weighted squares of each column (m²/s²), for three exponents,
+   * interpolated.
    *
    * @param exponent the middle one
    * @param apart distance of the others
    * @return for each column the value below, at and above the middle
    */
   double[][] explainedAround(double exponent, double apart) {
-    Powers first = powers(exponent - apart + 1);
-    Powers further = powers(apart);
     double[][] explained = new double[columns][3];
     for (int side = 0; side < 3; side++) {
+      Interpolation interpolation = new Interpolation(exponent + (side - 1) * apart);
       for (int c = 0; c < columns; c++) {
-        double product = 0;
-        double square = 0;
-        for (int j = firstCell[c]; j < firstCell[c + 1]; j++) {
-          double shape = (first.upper[j] - first.lower[j]) / (upper[j] - lower[j]);
-          product += weight[j] * velocity[j] * shape;
-          square += weight[j] * shape * shape;
-          first.upper[j] *= further.upper[j];
-          first.lower[j] *= further.lower[j];
-        }
-        explained[c][side] = square > 0 ? product * product / square : 0;
+        explained[c][side] = interpolation.of(byColumn[c]);
       }
     }
     return explained;

@@ -18,14 +18,19 @@ import org.crossreach.section.Section;
  */
 public record FlowDirection(double normal, double along) {
 
-  /** The axis of a pass; normal to the section where nothing flows. */
-  public static FlowDirection of(Section section) {
+  /**
+   * The axis of a pass; normal to the section where nothing flows.
+   *
+   * @param section the pass on its line
+   * @param step every how many columns one is looked at, at least 1
+   */
+  static FlowDirection of(Section section, int step) {
     double nn = 0;
     double na = 0;
     double aa = 0;
     VelocityRow row = section.newRow();
     Column column = section.newColumn();
-    for (int i = 0; i < section.size(); i++) {
+    for (int i = 0; i < section.size(); i += step) {
       section.read(i, row, column);
       double n = MeasuredZone.throughCells(column, Component.NORMAL);
       double a = MeasuredZone.throughCells(column, Component.ALONG);

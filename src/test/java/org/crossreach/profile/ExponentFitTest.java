@@ -26,27 +26,8 @@ class ExponentFitTest {
   @ValueSource(doubles = {3, 4, 5, 6, 7, 8, 10})
   void recoversExponentsWithoutNoise(double inverse) throws Exception {
     ExponentFit fit = fit(power(1 / inverse, "{}"));
-    assertEquals(1 / inverse, fit.value(), 1e-4);
+    assertEquals(1 / inverse, fit.value(), 2e-5, "velocities and depths are rounded to 1e-6");
     assertTrue(fit.refusal().isEmpty());
-  }
-
-  /** Interpolated between exponents where the sum is known, or computed outright: the same. */
-  @Test
-  void theSumOverColumnsIsTheSumOfTheColumns() throws Exception {
-    ColumnFit columns =
-        ColumnFit.of(
-            new Reducer(1)
-                .lay(Simulation.run(power(0.2, NOISE)).measurement(), Settings.defaults())
-                .passes()
-                .get(0)
-                .section());
-    for (double exponent = 0.03; exponent < 0.8; exponent += 0.031) {
-      double sum = 0;
-      for (double[] column : columns.explainedAround(exponent, 0.01)) {
-        sum += column[1];
-      }
-      assertEquals(sum, columns.explained(exponent), 1e-7 * sum);
-    }
   }
 
   @ParameterizedTest
