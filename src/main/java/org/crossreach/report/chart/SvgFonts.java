@@ -44,6 +44,7 @@ final class SvgFonts {
         if (family(face).equals(texts.group(1))) {
           TreeSet<Integer> used = letters.computeIfAbsent(face, each -> new TreeSet<>());
           texts.group(2).codePoints().forEach(used::add);
+          break; // Upright and slanted share a family; pictures have upright letters only.
         }
       }
     }
