@@ -7,5 +7,5 @@ set "JAVA=java"
 if defined JAVA_HOME set "JAVA=%JAVA_HOME%\bin\java"
 set "COLLECTOR=-XX:+UseSerialGC"
 echo "%CROSSREACH_JAVA_OPTS%" | findstr /r /c:"-XX:+Use.*GC" >nul && set "COLLECTOR="
-"%JAVA%" -Xshare:auto -Xlog:disable -Xlog:all=error:stderr %COLLECTOR% "-XX:SharedArchiveFile=%HOME_FOLDER%\lib\crossreach.jsa" %CROSSREACH_JAVA_OPTS% -cp "%HOME_FOLDER%\lib\crossreach.jar" org.crossreach.cli.Crossreach %*
+"%JAVA%" -Xshare:auto -Xlog:disable %COLLECTOR% "-XX:SharedArchiveFile=%HOME_FOLDER%\lib\crossreach.jsa" %CROSSREACH_JAVA_OPTS% -cp "%HOME_FOLDER%\lib\crossreach.jar" org.crossreach.cli.Crossreach %*
 exit /b %ERRORLEVEL%

@@ -1,16 +1,14 @@
 package org.crossreach.archive;
 
 import java.io.IOException;
-import java.nio.file.FileSystemLoopException;
-import java.nio.file.FileVisitOption;
-import java.nio.file.FileVisitResult;
+import java.nio.file.DirectoryIteratorException;
+import java.nio.file.DirectoryStream;
 import java.nio.file.Files;
 import java.nio.file.Path;
-import java.nio.file.SimpleFileVisitor;
-import java.nio.file.attribute.BasicFileAttributes;
+import java.util.ArrayDeque;
 import java.util.ArrayList;
 import java.util.Collection;
-import java.util.EnumSet;
+import java.util.Deque;
 import java.util.HashSet;
 import java.util.List;
 import java.util.Set;
@@ -19,8 +17,9 @@ import java.util.TreeMap;
 /**
  * Finds measurement folders: those that hold a {@code measurement.json}.
  *
- * <p>Links are followed, each real folder once; folders whose names begin with a point are passed
- * over. What cannot be entered is kept as a trouble and stops nothing.
+ * <p>Links are followed, each real folder once and under its own name before any link's; folders
+ * whose names begin with a point are passed over. What cannot be entered is kept as a trouble and
+ * stops nothing.
  */
 public final class Finder {
 
@@ -51,41 +50,39 @@ public final class Finder {
     for (Path root : roots) {
       String prefix = roots.size() > 1 ? name(root) + "/" : "";
       Files.newDirectoryStream(root).close();
-      Files.walkFileTree(
-          root,
-          EnumSet.of(FileVisitOption.FOLLOW_LINKS),
-          Integer.MAX_VALUE,
-          new SimpleFileVisitor<Path>() {
-            @Override
-            public FileVisitResult preVisitDirectory(Path folder, BasicFileAttributes attributes)
-                throws IOException {
-              boolean hidden = !folder.equals(root) && name(folder).startsWith(".");
-              if (hidden || !seen.add(folder.toRealPath())) {
-                return FileVisitResult.SKIP_SUBTREE;
-              }
-              if (Files.exists(folder.resolve(MARK))) {
-                String below = slashed(root.relativize(folder));
-                add(new Found(folder, prefix + (below.isEmpty() ? name(root) : below)));
-              }
-              return FileVisitResult.CONTINUE;
-            }
+      Deque<Path> folders = new ArrayDeque<>(List.of(root));
+      Deque<Path> links = new ArrayDeque<>();
+      while (!folders.isEmpty() || !links.isEmpty()) {
+        Path folder = folders.isEmpty() ? links.removeFirst() : folders.removeFirst();
+        try {
+          if (seen.add(folder.toRealPath())) {
+            enter(folder, root, prefix, folders, links);
+          }
+        } catch (IOException | DirectoryIteratorException trouble) {
+          troubles.add(folder + ": this cannot be looked into");
+        }
+      }
+    }
+  }
 
-            @Override
-            public FileVisitResult visitFileFailed(Path file, IOException trouble) {
-              if (!(trouble instanceof FileSystemLoopException)) {
-                troubles.add(file + ": this cannot be looked into");
-              }
-              return FileVisitResult.CONTINUE;
-            }
-
-            @Override
-            public FileVisitResult postVisitDirectory(Path folder, IOException trouble) {
-              if (trouble != null) {
-                troubles.add(folder + ": this cannot be listed to its end");
-              }
-              return FileVisitResult.CONTINUE;
-            }
-          });
+  /** Looks at one folder; what it holds comes in the order of names, links after all else. */
+  private void enter(Path folder, Path root, String prefix, Deque<Path> folders, Deque<Path> links)
+      throws IOException {
+    List<Path> inside = new ArrayList<>();
+    try (DirectoryStream<Path> entries = Files.newDirectoryStream(folder)) {
+      for (Path each : entries) {
+        if (!name(each).startsWith(".") && Files.isDirectory(each)) {
+          inside.add(each);
+        }
+      }
+    }
+    inside.sort(null);
+    for (Path each : inside) {
+      (Files.isSymbolicLink(each) ? links : folders).addLast(each);
+    }
+    if (Files.exists(folder.resolve(MARK))) {
+      String below = slashed(root.relativize(folder));
+      add(new Found(folder, prefix + (below.isEmpty() ? name(root) : below)));
     }
   }
 

@@ -51,14 +51,26 @@ record Keeper(Plan plan) {
     } catch (IOException unreadable) {
       return fail(place, found, before, List.of("cannot read " + unreadable.getMessage()));
     } catch (OutOfMemoryError tooLarge) {
-      return fail(
+      return falter(
           place,
           found,
           before,
-          List.of("the memory is too small for it; give more, or fewer jobs side by side"));
+          "the memory is too small for it; give more, or fewer jobs side by side");
     } catch (RuntimeException | Error fault) {
-      return fail(place, found, before, List.of("the program itself failed: " + fault));
+      return falter(place, found, before, "the program itself failed: " + fault);
     }
+  }
+
+  /**
+   * What the measurement is not to blame for: results that were kept before stay, and the next run
+   * tries again.
+   */
+  private Outcome falter(Place place, Found found, Optional<Manifest> before, String why)
+      throws CannotKeep {
+    if (before.isPresent() && before.get().done()) {
+      return new Outcome(found.place(), Outcome.Kind.FAILED, 0, List.of(why));
+    }
+    return fail(place, found, before, List.of(why));
   }
 
   private void write(Place place, Found found, Result result, Optional<Manifest> before)

@@ -4,6 +4,7 @@ import java.io.BufferedOutputStream;
 import java.io.IOException;
 import java.io.InputStream;
 import java.io.OutputStream;
+import java.io.UncheckedIOException;
 import java.nio.file.DirectoryStream;
 import java.nio.file.Files;
 import java.nio.file.Path;
@@ -108,6 +109,9 @@ final class Place {
       return new Kept(name, size, HexFormat.of().formatHex(digest.digest()));
     } catch (IOException trouble) {
       throw new CannotKeep(target.toString(), trouble);
+    } catch (UncheckedIOException trouble) {
+      // the writer of tables reports a full disk this way
+      throw new CannotKeep(target.toString(), trouble.getCause());
     }
   }
 

@@ -149,6 +149,14 @@ class ArchiveTest {
   }
 
   @Test
+  void keepsARealFolderUnderItsOwnNameWhateverLinksLeadToIt() throws IOException {
+    Files.createSymbolicLink(tree.resolve("a/alias"), tree.resolve("b/with blank"));
+    assertTrue(archive().out().startsWith("6 done"));
+    assertTrue(Files.exists(target.resolve("b/with blank/manifest.json")));
+    assertFalse(Files.exists(target.resolve("a/alias")));
+  }
+
+  @Test
   void takesAList() throws IOException {
     Path list = folder.resolve("list.txt");
     Files.writeString(list, tree.resolve("a/first") + "\n" + tree.resolve("deep") + "\n");

@@ -59,7 +59,7 @@ class AutomaticLimitTest {
   @CsvSource({"0.02", "0.05", "0.1", "0.3"})
   void sparesGaussianSamples(double sigma) {
     Count cells = new Count();
-    int boats = 0;
+    long boats = 0;
     for (int seed = 0; seed < SEEDS; seed++) {
       ScreenedPass pass = Recording.noisy(SIZE, sigma, seed).screen(everything());
       cells.add(pass, new boolean[SIZE][CELLS]);
