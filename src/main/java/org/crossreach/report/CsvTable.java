@@ -6,6 +6,7 @@ import de.siegmar.fastcsv.writer.LineDelimiter;
 import java.io.IOException;
 import java.io.OutputStream;
 import java.io.OutputStreamWriter;
+import java.io.UncheckedIOException;
 import java.io.Writer;
 import java.nio.charset.StandardCharsets;
 import java.util.List;
@@ -56,6 +57,14 @@ public record CsvTable<R>(List<Column<R>> columns) {
   public void write(Iterable<R> rows, OutputStream target) throws IOException {
     Writer writer = new OutputStreamWriter(target, StandardCharsets.UTF_8);
     CsvWriter csv = CsvWriter.builder().lineDelimiter(LineDelimiter.LF).build(writer);
+    try {
+      write(rows, csv);
+    } catch (UncheckedIOException hidden) { // so the CSV library tells of a full disk
+      throw hidden.getCause();
+    }
+  }
+
+  private void write(Iterable<R> rows, CsvWriter csv) throws IOException {
     String[] fields = new String[columns.size()];
     for (int c = 0; c < fields.length; c++) {
       fields[c] = columns.get(c).name();
