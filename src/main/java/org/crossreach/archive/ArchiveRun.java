@@ -1,8 +1,6 @@
 package org.crossreach.archive;
 
 import java.io.IOException;
-import java.util.ArrayList;
-import java.util.List;
 import java.util.concurrent.ExecutorService;
 import java.util.concurrent.Executors;
 import java.util.concurrent.Semaphore;
@@ -23,12 +21,12 @@ public record ArchiveRun(Plan plan, Listener listener) {
   }
 
   /**
-   * Keeps the measurements that belong to the plan's shard.
+   * Keeps measurements.
    *
    * <p>No more measurements are in memory than are worked on. When the archive cannot be written
    * the run stops; what is kept by then is whole, and the next run goes on from there.
    *
-   * @param found every measurement of the run
+   * @param found the measurements
    * @throws CannotKeep when the archive cannot be written
    */
   public void keep(Iterable<Found> found) throws IOException {
@@ -38,9 +36,6 @@ public record ArchiveRun(Plan plan, Listener listener) {
     ExecutorService workers = Executors.newFixedThreadPool(plan.jobs());
     try {
       for (Found each : found) {
-        if (!plan.shard().has(each)) {
-          continue;
-        }
         places.acquire();
         if (stop.get() != null) {
           break;
@@ -78,16 +73,5 @@ public record ArchiveRun(Plan plan, Listener listener) {
     synchronized (listener) {
       listener.finished(outcome);
     }
-  }
-
-  /** The measurements of a plan's shard, as a list. */
-  public static List<Found> ofShard(Iterable<Found> found, Shard shard) {
-    List<Found> own = new ArrayList<>();
-    for (Found each : found) {
-      if (shard.has(each)) {
-        own.add(each);
-      }
-    }
-    return own;
   }
 }

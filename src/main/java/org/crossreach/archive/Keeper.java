@@ -131,6 +131,6 @@ record Keeper(Plan plan) {
             products,
             problems,
             rows);
-    place.write(Manifest.NAME, ManifestFile.of(manifest));
+    place.write(Manifest.NAME, manifest::write);
   }
 }

@@ -1,6 +1,7 @@
 package org.crossreach.archive;
 
 import java.io.IOException;
+import java.io.OutputStream;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
@@ -68,16 +69,17 @@ record Manifest(
     return listed == Files.exists(found.folder().resolve("settings.json"));
   }
 
-  void write(JsonText json) throws IOException {
+  void write(OutputStream target) throws IOException {
+    try (JsonText json = new JsonText(target)) {
+      write(json);
+    }
+  }
+
+  private void write(JsonText json) throws IOException {
     json.object(
         () -> {
           json.text("format", FORMAT);
-          json.object(
-              "program",
-              () -> {
-                json.text("name", ProgramVersion.NAME);
-                json.text("version", version);
-              });
+          ProgramVersion.write(version, json);
           json.text("place", place);
           json.text("kinds", kinds);
           json.text("units", units);

@@ -17,12 +17,10 @@ import org.crossreach.survey.UnusableInput;
  * @param kinds kinds of files for each measurement; the result JSON always comes with them
  * @param units units of what people read
  * @param jobs number of measurements that are worked on side by side
- * @param shard which part of the work
  * @param overriding choices for all measurements in place of their own, as JSON with the keys of
  *     {@code settings.json}; empty for none
  */
-public record Plan(
-    Path target, Set<FileKind> kinds, Units units, int jobs, Shard shard, String overriding) {
+public record Plan(Path target, Set<FileKind> kinds, Units units, int jobs, String overriding) {
 
   public Plan {
     Set<FileKind> all = new TreeSet<>(kinds);

@@ -1,6 +1,8 @@
 package org.crossreach.archive;
 
 import java.nio.charset.StandardCharsets;
+import java.util.ArrayList;
+import java.util.List;
 import java.util.zip.CRC32;
 
 /**
@@ -38,8 +40,18 @@ public record Shard(int number, int of) {
     }
   }
 
-  /** Whether a measurement belongs to this part. */
-  public boolean has(Found found) {
+  /** The measurements that belong to this part, in the same order. */
+  public List<Found> of(Iterable<Found> found) {
+    List<Found> own = new ArrayList<>();
+    for (Found each : found) {
+      if (has(each)) {
+        own.add(each);
+      }
+    }
+    return own;
+  }
+
+  private boolean has(Found found) {
     CRC32 crc = new CRC32();
     crc.update(found.place().getBytes(StandardCharsets.UTF_8));
     return crc.getValue() % of == number - 1;

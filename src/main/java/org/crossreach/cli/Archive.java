@@ -113,13 +113,14 @@ final class Archive implements Callable<Integer> {
   public Integer call() throws UnusableInput, IOException {
     choices.applyTo(Settings.defaults());
     Plan plan = plan();
+    Shard part = part();
     try {
       if (indexOnly) {
         Index.write(target);
         return ExitCode.DONE;
       }
       Finder finder = find();
-      List<Found> found = ArchiveRun.ofShard(finder.found(), plan.shard());
+      List<Found> found = part.of(finder.found());
       ArchiveProgress progress =
           new ArchiveProgress(found.size(), quiet, spec.commandLine().getErr());
       try (progress) {
@@ -136,15 +137,17 @@ final class Archive implements Callable<Integer> {
     }
   }
 
+  private Shard part() {
+    try {
+      return shard == null ? Shard.WHOLE : Shard.parse(shard);
+    } catch (IllegalArgumentException wrong) {
+      throw new ParameterException(spec.commandLine(), wrong.getMessage());
+    }
+  }
+
   private Plan plan() {
     try {
-      return new Plan(
-          target,
-          EnumSet.copyOf(kinds),
-          units,
-          jobs,
-          shard == null ? Shard.WHOLE : Shard.parse(shard),
-          choices.asJson());
+      return new Plan(target, EnumSet.copyOf(kinds), units, jobs, choices.asJson());
     } catch (IllegalArgumentException wrong) {
       throw new ParameterException(spec.commandLine(), wrong.getMessage());
     }

@@ -1,13 +1,11 @@
 package org.crossreach.report;
 
-import java.io.BufferedOutputStream;
 import java.io.IOException;
 import java.io.OutputStream;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.FileSystemException;
 import java.nio.file.Files;
 import java.nio.file.Path;
-import java.nio.file.StandardCopyOption;
 
 /**
  * A folder that receives the files of one result.
@@ -88,16 +86,6 @@ public final class OutputFolder {
    * @return the path of the file
    */
   public Path write(String name, Product product) throws IOException {
-    Path target = folder.resolve(name);
-    Path unfinished = folder.resolve("." + name + "." + ProcessHandle.current().pid() + ".part");
-    try {
-      try (OutputStream stream = new BufferedOutputStream(Files.newOutputStream(unfinished))) {
-        product.write(stream);
-      }
-      return Files.move(
-          unfinished, target, StandardCopyOption.ATOMIC_MOVE, StandardCopyOption.REPLACE_EXISTING);
-    } finally {
-      Files.deleteIfExists(unfinished);
-    }
+    return WholeFile.write(folder.resolve(name), product);
   }
 }

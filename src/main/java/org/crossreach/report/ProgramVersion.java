@@ -3,6 +3,7 @@ package org.crossreach.report;
 import java.io.IOException;
 import java.io.InputStream;
 import java.nio.charset.StandardCharsets;
+import org.crossreach.notation.JsonText;
 
 /** The name and version of the program, as every result gives them. */
 public final class ProgramVersion {
@@ -28,5 +29,15 @@ public final class ProgramVersion {
     } catch (IOException unreadable) {
       throw new IllegalStateException("this build has no readable " + RESOURCE, unreadable);
     }
+  }
+
+  /** Writes the member {@code program} of a file of ours, with a version of the program. */
+  public static void write(String version, JsonText json) throws IOException {
+    json.object(
+        "program",
+        () -> {
+          json.text("name", NAME);
+          json.text("version", version);
+        });
   }
 }

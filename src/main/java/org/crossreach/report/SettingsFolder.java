@@ -1,12 +1,9 @@
 package org.crossreach.report;
 
-import java.io.BufferedOutputStream;
 import java.io.IOException;
-import java.io.OutputStream;
 import java.nio.file.FileSystemException;
 import java.nio.file.Files;
 import java.nio.file.Path;
-import java.nio.file.StandardCopyOption;
 import org.crossreach.settings.Settings;
 
 /** Writes the settings of a measurement into its folder, whole or not at all. */
@@ -30,15 +27,6 @@ public final class SettingsFolder {
       throw new FileSystemException(
           target.toString(), null, "this file does not hold settings of crossreach; move it away");
     }
-    Path unfinished = folder.resolve("." + FILE + "." + ProcessHandle.current().pid() + ".part");
-    try {
-      try (OutputStream stream = new BufferedOutputStream(Files.newOutputStream(unfinished))) {
-        SettingsJson.write(settings, stream);
-      }
-      return Files.move(
-          unfinished, target, StandardCopyOption.ATOMIC_MOVE, StandardCopyOption.REPLACE_EXISTING);
-    } finally {
-      Files.deleteIfExists(unfinished);
-    }
+    return WholeFile.write(target, stream -> SettingsJson.write(settings, stream));
   }
 }

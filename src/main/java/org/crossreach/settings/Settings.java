@@ -147,22 +147,6 @@ public record Settings(
         movingBed);
   }
 
-  /** The same choices with another edgeEnsembles. */
-  public Settings withEdgeEnsembles(int edgeEnsembles) {
-    return new Settings(
-        boatVelocity,
-        method,
-        section,
-        depth,
-        top,
-        bottom,
-        exponent,
-        edgeEnsembles,
-        screening,
-        soundSpeed,
-        movingBed);
-  }
-
   /** The same choices with another screening. */
   public Settings withScreening(Screening screening) {
     return new Settings(

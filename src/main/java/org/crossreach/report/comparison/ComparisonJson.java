@@ -36,12 +36,7 @@ public final class ComparisonJson {
       json.object(
           () -> {
             json.text("format", FORMAT);
-            json.object(
-                "program",
-                () -> {
-                  json.text("name", ProgramVersion.NAME);
-                  json.text("version", ProgramVersion.read());
-                });
+            ProgramVersion.write(ProgramVersion.read(), json);
             json.objects("measurements", comparisons, each -> measurement(each, json));
           });
     }

@@ -11,12 +11,7 @@ final class ProgramPart implements ResultPart {
 
   @Override
   public void write(Result result, JsonText json) throws IOException {
-    json.object(
-        "program",
-        () -> {
-          json.text("name", ProgramVersion.NAME);
-          json.text("version", ProgramVersion.read());
-        });
+    ProgramVersion.write(ProgramVersion.read(), json);
     json.objects(
         "inputs",
         result.reduction().measurement().inputs(),
