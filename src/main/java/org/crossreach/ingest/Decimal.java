@@ -54,26 +54,6 @@ final class Decimal {
    */
   static double parse(char[] text, int from, int to) {
     int minus = from < to && text[from] == '-' ? 1 : 0;
-    int size = to - from - minus;
-    if ((size == 5 || size == 6) && text[to - 4] == '.') {
-      int tens = size == 6 ? text[to - 6] - '0' : 0;
-      int units = text[to - 5] - '0';
-      int tenths = text[to - 3] - '0';
-      int hundredths = text[to - 2] - '0';
-      int thousandths = text[to - 1] - '0';
-      int sixteens = tens | units | tenths | hundredths | thousandths;
-      int aboveNine =
-          (9 - tens) | (9 - units) | (9 - tenths) | (9 - hundredths) | (9 - thousandths);
-      if ((sixteens | aboveNine) >= 0) {
-        int whole = 10_000 * tens + 1000 * units + 100 * tenths + 10 * hundredths + thousandths;
-        return whole / SIGNED_POWERS[minus * EXACT_POWERS + 3];
-      }
-    }
-    return parseAny(text, from, to);
-  }
-
-  private static double parseAny(char[] text, int from, int to) {
-    int minus = from < to && text[from] == '-' ? 1 : 0;
     int at = from + minus;
     int digits = to - at;
     int decimals = 0;
@@ -92,11 +72,27 @@ final class Decimal {
         at++;
       }
     }
-    if (at == to && digits > 0 && digits <= SAFE_DIGITS && whole <= EXACT) {
-      return whole / SIGNED_POWERS[minus * EXACT_POWERS + decimals];
+    double value = at == to && digits > 0 ? of(whole, digits, decimals, minus) : Double.NaN;
+    if (!Double.isNaN(value)) {
+      return value;
     }
     return isDecimal(text, from, to)
         ? JavaDoubleParser.parseDouble(text, from, to - from)
+        : Double.NaN;
+  }
+
+  /**
+   * The number that some digits make.
+   *
+   * @param whole the digits as a whole number, whatever it is when they are too many for a long
+   * @param digits how many they are
+   * @param decimals how many of them stand behind the point
+   * @param minus 1 when the number is negative, else 0
+   * @return the number, NaN when the digits are too many to be exact
+   */
+  static double of(long whole, int digits, int decimals, int minus) {
+    return digits <= SAFE_DIGITS && whole <= EXACT
+        ? whole / SIGNED_POWERS[minus * EXACT_POWERS + decimals]
         : Double.NaN;
   }
 

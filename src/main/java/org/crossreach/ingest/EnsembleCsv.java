@@ -15,12 +15,13 @@ import org.crossreach.survey.UnusableInput;
  *
  * <p>One pass over the bytes: they are digested, unpacked, checked to be UTF-8, split by the rules
  * of RFC 4180 and turned into numbers without a String per field, in memory that depends on the
- * numbers kept and not on what the file looks like. Beyond the format's own rules: blank lines are
+ * numbers kept and not on what the file looks like. Rows of plain numbers, which most rows are,
+ * take a short way through {@link PlainRows}. Beyond the format's own rules: blank lines are
  * skipped; spaces and tabs around names, numbers and times are ignored; numbers are as {@link
  * Decimal} says and within {@link PhysicalRange}, also in cells beyond the ensemble's number of
  * cells, whose values are then dropped.
  *
- * <p>Bounds, beyond which a file is refused: {@value EnsembleTable#MOST_COLUMNS} columns, {@value
+ * <p>Bounds, beyond which a file is refused: {@value EnsembleFields#MOST_COLUMNS} columns, {@value
  * EnsembleColumn#MOST_CELLS} cells, {@value #LONGEST_FIELD} characters in a field, {@value
  * EnsembleTable#MOST_NUMBERS} numbers kept, 31 days from the first ensemble to the last; for gzip
  * those of {@link BoundedGunzip}.
@@ -70,15 +71,16 @@ public final class EnsembleCsv {
 
   private static EnsembleTable readTable(InputStream stored, boolean packed, FileProblems problems)
       throws UnusableInput, IOException {
-    StrictUtf8Reader text;
+    EnsembleTable table = new EnsembleTable(problems);
+    PlainRows plain;
     try {
-      text = new StrictUtf8Reader(packed ? new BoundedGunzip(stored) : stored);
+      plain = new PlainRows(packed ? new BoundedGunzip(stored) : stored, table);
     } catch (UnreadableText e) {
       problems.add(0, "", e.found(), e.expected(), e.remedy());
       throw new UnusableInput(problems.list());
     }
-    EnsembleTable table = new EnsembleTable(text, problems);
-    if (parse(text, table, problems)) {
+    StrictUtf8Reader text = new StrictUtf8Reader(plain);
+    if (parse(text, new EnsembleFields(text, plain, table, problems), problems)) {
       if (table.header() == null) {
         problems.add(0, "", "an empty file", "a header row and rows of ensembles", "");
       } else if (!table.hasRows()) {
@@ -88,8 +90,8 @@ public final class EnsembleCsv {
     return table;
   }
 
-  /** Sends the text through the table; false when it had to stop before the end. */
-  private static boolean parse(StrictUtf8Reader text, EnsembleTable table, FileProblems problems)
+  /** Sends the text through the fields; false when it had to stop before the end. */
+  private static boolean parse(StrictUtf8Reader text, EnsembleFields fields, FileProblems problems)
       throws IOException {
     try {
       CsvReader.builder()
@@ -98,42 +100,42 @@ public final class EnsembleCsv {
           .allowMissingFields(true)
           .allowExtraCharsAfterClosingQuote(false)
           .maxBufferSize(LONGEST_FIELD)
-          .build(table, text)
+          .build(fields, text)
           .iterator()
           .hasNext();
       return true;
     } catch (UncheckedIOException e) {
       if (e.getCause() instanceof UnreadableText unreadable) {
         problems.add(
-            table.line(), "", unreadable.found(), unreadable.expected(), unreadable.remedy());
+            fields.line(), "", unreadable.found(), unreadable.expected(), unreadable.remedy());
         return false;
       }
       throw e.getCause();
     } catch (CsvParseException e) {
-      if (e.getCause() instanceof EnsembleTable.Stopped) {
+      if (e.getCause() instanceof EnsembleFields.Stopped) {
         return false;
       }
       if (!(e.getCause() instanceof CsvParseException)) {
         throw unexpected(e.getCause());
       }
-      reportQuoting(text, table, problems);
+      reportQuoting(text, fields, problems);
       return false;
     }
   }
 
   /** The parser gives up for two reasons; the size of the buffer it was filling tells which. */
   private static void reportQuoting(
-      StrictUtf8Reader text, EnsembleTable table, FileProblems problems) {
+      StrictUtf8Reader text, EnsembleFields fields, FileProblems problems) {
     if (text.largestTarget() >= LONGEST_FIELD) {
       problems.add(
-          table.line(),
+          fields.line(),
           "",
           "a field of more than " + LONGEST_FIELD + " characters",
           "at most " + LONGEST_FIELD,
           "look for a quotation mark without its partner, or missing line breaks");
     } else {
       problems.add(
-          table.line(),
+          fields.line(),
           "",
           "text after a closing quotation mark",
           "a comma or the end of the row",
