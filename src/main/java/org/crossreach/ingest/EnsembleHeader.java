@@ -1,6 +1,7 @@
 package org.crossreach.ingest;
 
 import java.util.ArrayList;
+import java.util.Collections;
 import java.util.EnumMap;
 import java.util.LinkedHashMap;
 import java.util.List;
@@ -45,7 +46,7 @@ final class EnsembleHeader {
       recognise(names.get(i).strip(), i + 1);
     }
     frame = findFrame();
-    maxCells = cellsOf.values().stream().mapToInt(Integer::intValue).max().orElse(0);
+    maxCells = cellsOf.isEmpty() ? 0 : Collections.max(cellsOf.values());
     if (places.isEmpty()) {
       refuse(names.isEmpty() ? "" : names.get(0));
     } else {
@@ -239,7 +240,7 @@ final class EnsembleHeader {
 
   private void requireDepth() {
     for (EnsembleColumn column : columns) {
-      if (column != null && PhysicalRange.DEPTH.equals(column.range())) {
+      if (column != null && column.range() == PhysicalRange.DEPTH) {
         return;
       }
     }

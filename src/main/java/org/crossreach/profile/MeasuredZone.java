@@ -10,11 +10,7 @@ final class MeasuredZone {
 
   /** Transport through the usable cells themselves. */
   static double throughCells(Column column, Component component) {
-    double sum = 0;
-    for (int j = 0; j < column.size(); j++) {
-      sum += column.velocityMps(component, j) * column.heightM(j);
-    }
-    return sum;
+    return column.transportM2s(component);
   }
 
   /**
@@ -22,6 +18,9 @@ final class MeasuredZone {
    * of the cells above and below the gap.
    */
   static double throughGaps(Column column, Component component) {
+    if (column.unbroken(0)) {
+      return 0;
+    }
     double sum = 0;
     for (int j = 0; j + 1 < column.size(); j++) {
       if (column.joined(j)) {

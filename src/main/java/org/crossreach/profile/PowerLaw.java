@@ -31,21 +31,30 @@ final class PowerLaw implements VelocityLaw {
    * @param from first cell of the column used; all below it are used too
    */
   static double amplitude(Column column, Component component, int from, double exponent) {
-    int size = column.size();
-    double sum = 0;
+    double sum = from == 0 ? column.transportM2s(component) : 0;
+    for (int j = from; from > 0 && j < column.size(); j++) {
+      sum += column.velocityMps(component, j) * column.heightM(j);
+    }
+    return sum / divisor(column, from, exponent);
+  }
+
+  private static double divisor(Column column, int from, double exponent) {
+    int last = column.size() - 1;
+    if (column.unbroken(from)) {
+      return between(column.lowerM(last), column.upperM(from), exponent);
+    }
     double divisor = 0;
     double upper = Double.NaN;
-    for (int j = from; j < size; j++) {
-      sum += column.velocityMps(component, j) * column.heightM(j);
+    for (int j = from; j <= last; j++) {
       // Within a run of joined cells the powers cancel: only its ends count.
       if (j == from || !column.joined(j - 1)) {
         upper = raised(column.upperM(j), exponent);
       }
-      if (j == size - 1 || !column.joined(j)) {
+      if (j == last || !column.joined(j)) {
         divisor += upper - raised(column.lowerM(j), exponent);
       }
     }
-    return sum / divisor;
+    return divisor;
   }
 
   private static double raised(double height, double exponent) {

@@ -1,5 +1,7 @@
 package org.crossreach.screen;
 
+import java.util.Arrays;
+
 /**
  * The velocities of an ensemble and of its neighbours in time, cell beside cell: where an ensemble
  * has other cells, those are taken that hold the centres of the middle ensemble's cells.
@@ -29,9 +31,13 @@ final class AlignedRows {
   private final double[] offsetEast = new double[ROWS];
   private final double[] offsetNorth = new double[ROWS];
 
+  /** For each cell of the middle ensemble how many rows are near to it. */
+  private final int[] agreeing;
+
   AlignedRows(CellFacts facts, RowWindow window) {
     this.facts = facts;
     this.window = window;
+    agreeing = new int[facts.cells()];
     shiftedEast = new double[ROWS][facts.cells()];
     shiftedNorth = new double[ROWS][facts.cells()];
   }
@@ -56,14 +62,16 @@ final class AlignedRows {
   }
 
   private boolean sameCells(int a, int b) {
-    return facts.firstCellM(a) == facts.firstCellM(b) && facts.cellSizeM(a) == facts.cellSizeM(b);
+    double[] first = facts.firstCellM();
+    double[] size = facts.cellSizeM();
+    return first[a] == first[b] && size[a] == size[b];
   }
 
   private void shift(int ensemble, int other, int row) {
-    double first = facts.firstCellM(ensemble);
-    double size = facts.cellSizeM(ensemble);
-    double otherTop = facts.firstCellM(other) - 0.5 * facts.cellSizeM(other);
-    double otherSize = facts.cellSizeM(other);
+    double first = facts.firstCellM()[ensemble];
+    double size = facts.cellSizeM()[ensemble];
+    double otherTop = facts.firstCellM()[other] - 0.5 * facts.cellSizeM()[other];
+    double otherSize = facts.cellSizeM()[other];
     for (int k = 0; k < facts.cells(); k++) {
       int cell = (int) Math.floor((first + k * size - otherTop) / otherSize);
       boolean there = cell >= 0 && cell < facts.cells();
@@ -85,30 +93,49 @@ final class AlignedRows {
    * @return how many there are
    */
   int disagreeing(double near, byte[] reasons, int[] found) {
-    double[] ownEast = east[REACH];
-    double[] ownNorth = north[REACH];
+    Arrays.fill(agreeing, 0);
+    for (int n = 0; n < MAJORITY; n++) {
+      agree(NEAREST_FIRST[n], near);
+    }
     int size = 0;
     for (int k = 0; k < reasons.length; k++) {
-      if (reasons[k] != 0) {
-        continue;
-      }
-      double e = ownEast[k] - offsetEast[REACH];
-      double n = ownNorth[k] - offsetNorth[REACH];
-      int agreeing = 0;
-      for (int row : NEAREST_FIRST) {
-        double[] otherEast = east[row];
-        if (otherEast != null
-            && Math.abs(otherEast[k] - offsetEast[row] - e) <= near
-            && Math.abs(north[row][k] - offsetNorth[row] - n) <= near
-            && ++agreeing == MAJORITY) {
-          break;
-        }
-      }
-      if (agreeing < MAJORITY) {
+      if (reasons[k] == 0 && agreeing[k] < MAJORITY) {
         found[size++] = k;
       }
     }
-    return size;
+    if (size == 0) {
+      return 0;
+    }
+    for (int n = MAJORITY; n < NEAREST_FIRST.length; n++) {
+      agree(NEAREST_FIRST[n], near);
+    }
+    int left = 0;
+    for (int s = 0; s < size; s++) {
+      if (agreeing[found[s]] < MAJORITY) {
+        found[left++] = found[s];
+      }
+    }
+    return left;
+  }
+
+  /** Counts the cells of the middle ensemble to which those of another row are near. */
+  private void agree(int row, double near) {
+    double[] otherEast = east[row];
+    double[] otherNorth = north[row];
+    if (otherEast == null) {
+      return;
+    }
+    double[] ownEast = east[REACH];
+    double[] ownNorth = north[REACH];
+    double shiftEast = offsetEast[row] - offsetEast[REACH];
+    double shiftNorth = offsetNorth[row] - offsetNorth[REACH];
+    int[] count = agreeing;
+    for (int k = 0; k < count.length; k++) {
+      if (Math.abs(otherEast[k] - ownEast[k] - shiftEast) <= near
+          && Math.abs(otherNorth[k] - ownNorth[k] - shiftNorth) <= near) {
+        count[k]++;
+      }
+    }
   }
 
   /** Chooses how velocities stand: relative to the middle of their ensemble, or as they are. */

@@ -3,7 +3,6 @@ package org.crossreach.screen;
 import org.crossreach.settings.Screening;
 import org.crossreach.survey.CellGrid;
 import org.crossreach.survey.CellQuantity;
-import org.crossreach.survey.EnsembleQuantity;
 import org.crossreach.survey.Ensembles;
 import org.crossreach.survey.Frame;
 
@@ -12,7 +11,9 @@ import org.crossreach.survey.Frame;
  *
  * @param ensembles what was recorded
  * @param water velocities relative to the boat
- * @param sound what distances are multiplied by
+ * @param sound what distances along the beams are multiplied by
+ * @param firstCellM depth of the first cell's centre below the face (m)
+ * @param cellSizeM height of a cell (m)
  * @param draftM depth of the face below the surface (m)
  * @param lowestM depth below the face above which a cell must end (m)
  * @param boatEastMps eastward velocity of the boat (m/s), gaps filled; all NaN when unknown
@@ -25,6 +26,8 @@ record CellFacts(
     Ensembles ensembles,
     WaterVelocities water,
     SoundRatio sound,
+    double[] firstCellM,
+    double[] cellSizeM,
     double draftM,
     double[] lowestM,
     double[] boatEastMps,
@@ -39,16 +42,6 @@ record CellFacts(
 
   int cells() {
     return ensembles.maxCells();
-  }
-
-  /** Depth of the first cell's centre below the face (m). */
-  double firstCellM(int ensemble) {
-    return sound.at(ensemble) * ensembles.value(EnsembleQuantity.FIRST_CELL_M, ensemble);
-  }
-
-  /** Height of a cell (m). */
-  double cellSizeM(int ensemble) {
-    return sound.at(ensemble) * ensembles.value(EnsembleQuantity.CELL_SIZE_M, ensemble);
   }
 
   /** Whether the boat's horizontal velocity is known. */

@@ -46,9 +46,9 @@ final class CellJudge {
       Arrays.fill(reasons, 0, own, Reason.EXCLUDED.code());
       return;
     }
-    double size = facts.cellSizeM(ensemble);
+    double size = facts.cellSizeM()[ensemble];
     // All depths are measured from the transducer face: the draft cancels.
-    double top = facts.firstCellM(ensemble) - 0.5 * size;
+    double top = facts.firstCellM()[ensemble] - 0.5 * size;
     double lowest = facts.lowestM()[ensemble];
     double highest = facts.screening().leaveOutTopM() - facts.draftM();
     int above = 0;
@@ -61,34 +61,66 @@ final class CellJudge {
       below++;
     }
     Arrays.fill(reasons, 0, below, Reason.NEAR_SURFACE.code());
+    markMissing(row, below, above, reasons);
+    if (rejectThreeBeam) {
+      markWithoutError(row.error, below, above, reasons);
+    }
+    markBelow(goodPct, limits.goodPct(), Reason.GOOD_PCT, ensemble, row, reasons);
+    markBelow(correlation, limits.correlation(), Reason.CORRELATION, ensemble, row, reasons);
+    markBelow(intensity, limits.intensity(), Reason.INTENSITY, ensemble, row, reasons);
+    markBeyond(row.error, 0, limits.errorCentre(), limits.error(), Reason.ERROR_VELOCITY, reasons);
     double boatUp = limits.verticalOverBed() ? facts.boatUpMps()[ensemble] : 0;
-    for (int k = below; k < above; k++) {
-      reasons[k] = bySamples(ensemble, row, k, boatUp).code();
+    markBeyond(
+        row.up,
+        boatUp,
+        limits.verticalCentre(),
+        limits.vertical(),
+        Reason.VERTICAL_VELOCITY,
+        reasons);
+  }
+
+  private static void markMissing(VelocityRow row, int from, int to, byte[] reasons) {
+    double[] east = row.east;
+    double[] north = row.north;
+    byte missing = Reason.MISSING.code();
+    for (int k = from; k < to; k++) {
+      reasons[k] = Double.isNaN(east[k]) || Double.isNaN(north[k]) ? missing : 0;
     }
   }
 
-  private Reason bySamples(int ensemble, VelocityRow row, int k, double boatUp) {
-    if (Double.isNaN(row.east[k]) || Double.isNaN(row.north[k])) {
-      return Reason.MISSING;
+  private static void markWithoutError(double[] error, int from, int to, byte[] reasons) {
+    for (int k = from; k < to; k++) {
+      if (reasons[k] == 0 && Double.isNaN(error[k])) {
+        reasons[k] = Reason.THREE_BEAM.code();
+      }
     }
-    if (rejectThreeBeam && Double.isNaN(row.error[k])) {
-      return Reason.THREE_BEAM;
+  }
+
+  /** Marks the cells that are good so far and have less of a quantity than they should. */
+  private static void markBelow(
+      CellGrid grid, double lowest, Reason reason, int ensemble, VelocityRow row, byte[] reasons) {
+    if (grid == null) {
+      return;
     }
-    if (goodPct != null && goodPct.get(ensemble, k) < limits.goodPct()) {
-      return Reason.GOOD_PCT;
+    double[] values = row.other;
+    grid.copyRow(ensemble, values);
+    for (int k = 0; k < reasons.length; k++) {
+      if (values[k] < lowest && reasons[k] == 0) {
+        reasons[k] = reason.code();
+      }
     }
-    if (correlation != null && correlation.get(ensemble, k) < limits.correlation()) {
-      return Reason.CORRELATION;
+  }
+
+  /** Marks the cells that are good so far and whose velocity departs too far from a centre. */
+  private static void markBeyond(
+      double[] values, double shift, double centre, double limit, Reason reason, byte[] reasons) {
+    if (Double.isNaN(limit)) {
+      return;
     }
-    if (intensity != null && intensity.get(ensemble, k) < limits.intensity()) {
-      return Reason.INTENSITY;
+    for (int k = 0; k < reasons.length; k++) {
+      if (Math.abs(values[k] + shift - centre) > limit && reasons[k] == 0) {
+        reasons[k] = reason.code();
+      }
     }
-    if (Math.abs(row.error[k] - limits.errorCentre()) > limits.error()) {
-      return Reason.ERROR_VELOCITY;
-    }
-    if (Math.abs(row.up[k] + boatUp - limits.verticalCentre()) > limits.vertical()) {
-      return Reason.VERTICAL_VELOCITY;
-    }
-    return Reason.NONE;
   }
 }

@@ -74,11 +74,13 @@ final class EarthTurn {
   private static void level(VelocityRow row, int size, double r) {
     double cos = r * row.rotation[0];
     double sin = r * row.rotation[1];
+    double[] east = row.east;
+    double[] north = row.north;
     for (int k = 0; k < size; k++) {
-      double x = row.east[k];
-      double y = row.north[k];
-      row.east[k] = cos * x + sin * y;
-      row.north[k] = cos * y - sin * x;
+      double x = east[k];
+      double y = north[k];
+      east[k] = cos * x + sin * y;
+      north[k] = cos * y - sin * x;
     }
   }
 

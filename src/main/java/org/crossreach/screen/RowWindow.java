@@ -19,6 +19,7 @@ final class RowWindow {
   private final CellFacts facts;
   private final CellJudge judge;
   private final boolean middles;
+  private final boolean errors;
   private final VelocityRow row;
   private final double[] scratch;
   private final int[] usedCells;
@@ -38,6 +39,7 @@ final class RowWindow {
    */
   RowWindow(CellFacts facts, CellJudge judge, boolean middles) {
     this.middles = middles;
+    this.errors = facts.errors();
     this.facts = facts;
     this.judge = judge;
     int cells = facts.cells();
@@ -75,20 +77,35 @@ final class RowWindow {
     boolean boatKnown = facts.boatKnown();
     double boatEast = boatKnown ? facts.boatEastMps()[ensemble] : 0;
     double boatNorth = boatKnown ? facts.boatNorthMps()[ensemble] : 0;
+    byte[] why = reasons[slot];
+    double[] rowEast = row.east;
+    double[] rowNorth = row.north;
+    double[] slotEast = east[slot];
+    double[] slotNorth = north[slot];
     int count = 0;
-    for (int k = 0; k < scratch.length; k++) {
-      boolean accepted = reasons[slot][k] == 0;
-      east[slot][k] = accepted ? row.east[k] + boatEast : Double.NaN;
-      north[slot][k] = accepted ? row.north[k] + boatNorth : Double.NaN;
-      threeBeam[slot][k] = accepted && Double.isNaN(row.error[k]);
-      if (accepted) {
+    for (int k = 0; k < why.length; k++) {
+      if (why[k] == 0) {
+        slotEast[k] = rowEast[k] + boatEast;
+        slotNorth[k] = rowNorth[k] + boatNorth;
         usedCells[count++] = k;
+      } else {
+        slotEast[k] = Double.NaN;
+        slotNorth[k] = Double.NaN;
       }
+    }
+    if (errors) {
+      noteThreeBeam(why, threeBeam[slot]);
     }
     used[slot] = count;
     if (middles) {
       middleEast[slot] = median(east[slot], count);
       middleNorth[slot] = median(north[slot], count);
+    }
+  }
+
+  private void noteThreeBeam(byte[] why, boolean[] withoutError) {
+    for (int k = 0; k < why.length; k++) {
+      withoutError[k] = why[k] == 0 && Double.isNaN(row.error[k]);
     }
   }
 
@@ -116,7 +133,7 @@ final class RowWindow {
     return reasons[ensemble % SLOTS];
   }
 
-  /** Which used cells of a loaded ensemble have no error velocity. */
+  /** Which used cells of a loaded ensemble have no error velocity, where the record has any. */
   boolean[] withoutError(int ensemble) {
     return threeBeam[ensemble % SLOTS];
   }

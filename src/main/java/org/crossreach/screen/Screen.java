@@ -65,6 +65,8 @@ public record Screen(Instrument instrument, Water water, Settings settings) {
             new WaterVelocities(
                 ensembles, new EarthTurn(ensembles, layout, waterBeam, attitude, sound.ratio())),
             sound.ratio(),
+            corrected(ensembles, EnsembleQuantity.FIRST_CELL_M, sound.ratio()),
+            corrected(ensembles, EnsembleQuantity.CELL_SIZE_M, sound.ratio()),
             instrument.draftM(),
             lowest,
             boat(ensembles, bottom, bottom.eastMps, EnsembleQuantity.GNSS_EAST_MPS, elapsed),
@@ -110,6 +112,16 @@ public record Screen(Instrument instrument, Water water, Settings settings) {
       elapsed[i] = ensembles.elapsedS(i);
     }
     return elapsed;
+  }
+
+  /** A distance along the beams by the true speed of sound, by ensemble. */
+  private static double[] corrected(
+      Ensembles ensembles, EnsembleQuantity quantity, SoundRatio sound) {
+    double[] distance = new double[ensembles.size()];
+    for (int i = 0; i < distance.length; i++) {
+      distance[i] = sound.at(i) * ensembles.value(quantity, i);
+    }
+    return distance;
   }
 
   /** Depth below the face above which side lobes do not reach (m), by ensemble. */

@@ -89,12 +89,12 @@ public final class ScreenedPass {
 
   /** Depth of the upper edge of cell 0 below the water surface (m). */
   public double topOfCellsM(int ensemble) {
-    return draftM() + facts.firstCellM(ensemble) - 0.5 * facts.cellSizeM(ensemble);
+    return draftM() + facts.firstCellM()[ensemble] - 0.5 * facts.cellSizeM()[ensemble];
   }
 
   /** Height of a cell (m). */
   public double cellSizeM(int ensemble) {
-    return facts.cellSizeM(ensemble);
+    return facts.cellSizeM()[ensemble];
   }
 
   /**
@@ -125,13 +125,14 @@ public final class ScreenedPass {
   }
 
   /**
-   * Reads the water velocities of an ensemble, usable or not.
+   * Reads the water velocities of an ensemble, and which of them are usable.
    *
    * @param ensemble from 0
    * @param row receives them
    */
   public void read(int ensemble, VelocityRow row) {
     facts.water().read(ensemble, row, false);
+    System.arraycopy(reasons, ensemble * maxCells(), row.reasons, 0, maxCells());
   }
 
   /** Number of ensembles with at least one usable cell. */

@@ -16,6 +16,12 @@ public final class VelocityRow {
   final double[] error;
   final double[] rotation = new double[9];
 
+  /** Why each cell is not used, 0 when it is; known once its pass was screened. */
+  final byte[] reasons;
+
+  /** Room for another quantity of the cells. */
+  final double[] other;
+
   /**
    * Makes room.
    *
@@ -26,8 +32,15 @@ public final class VelocityRow {
     north = new double[cells];
     up = new double[cells];
     error = new double[cells];
+    reasons = new byte[cells];
+    other = new double[cells];
     Arrays.fill(up, Double.NaN);
     Arrays.fill(error, Double.NaN);
+  }
+
+  /** Whether a cell may be used. */
+  public boolean usable(int cell) {
+    return reasons[cell] == 0;
   }
 
   /** Eastward velocity of the water relative to the boat (m/s). */

@@ -17,6 +17,11 @@ public final class Column {
   final double[] normalMps;
   final double[] alongMps;
 
+  /** Sums of velocity times height over the cells (m²/s). */
+  double normalTransport;
+
+  double alongTransport;
+
   /**
    * Makes room.
    *
@@ -70,6 +75,16 @@ public final class Column {
     return component == Component.NORMAL ? normalMps[j] : alongMps[j];
   }
 
+  /** Sum of velocity times height over all cells (m²/s). */
+  public double transportM2s(Component component) {
+    return component == Component.NORMAL ? normalTransport : alongTransport;
+  }
+
+  /** Whether no cell is missing between cell {@code first} and the lowest one. */
+  public boolean unbroken(int first) {
+    return cell[size - 1] - cell[first] == size - 1 - first;
+  }
+
   /** Whether no cell is missing between cell {@code j} and the next one below. */
   public boolean joined(int j) {
     return cell[j] + 1 == cell[j + 1];
@@ -90,6 +105,16 @@ public final class Column {
     System.arraycopy(source.lowerM, from, lowerM, 0, size);
     System.arraycopy(source.normalMps, from, normalMps, 0, size);
     System.arraycopy(source.alongMps, from, alongMps, 0, size);
+    sum();
+  }
+
+  private void sum() {
+    normalTransport = 0;
+    alongTransport = 0;
+    for (int j = 0; j < size; j++) {
+      normalTransport += normalMps[j] * (upperM[j] - lowerM[j]);
+      alongTransport += alongMps[j] * (upperM[j] - lowerM[j]);
+    }
   }
 
   /**
@@ -106,5 +131,6 @@ public final class Column {
       normalMps[j] = normalPart * normal + alongPart * along;
       alongMps[j] = normalPart * along - alongPart * normal;
     }
+    sum();
   }
 }

@@ -19,6 +19,8 @@ public final class Section {
   private final Bank startBank;
   private final double[] depthM;
   private final boolean[] depthFilled;
+  private final double[] progressM;
+  private final double[] sidewaysM;
 
   private Section(
       ScreenedPass pass,
@@ -33,6 +35,15 @@ public final class Section {
     this.startBank = startBank;
     this.depthM = depthM;
     this.depthFilled = depthFilled;
+    progressM = new double[depthM.length];
+    sidewaysM = new double[depthM.length];
+    double forward = forward();
+    for (int i = 0; i < depthM.length; i++) {
+      double east = track.displacementEastM(i);
+      double north = track.displacementNorthM(i);
+      progressM[i] = forward * line.along(east, north);
+      sidewaysM[i] = forward * line.normal(east, north);
+    }
   }
 
   /**
@@ -94,8 +105,7 @@ public final class Section {
    * to the start.
    */
   public double progressM(int ensemble) {
-    return forward()
-        * line.along(track.displacementEastM(ensemble), track.displacementNorthM(ensemble));
+    return progressM[ensemble];
   }
 
   /**
@@ -104,8 +114,7 @@ public final class Section {
    * the flux through the boat's path, positive downstream, for both.
    */
   public double sidewaysM(int ensemble) {
-    return forward()
-        * line.normal(track.displacementEastM(ensemble), track.displacementNorthM(ensemble));
+    return sidewaysM[ensemble];
   }
 
   /** Distance along the line from the first ensemble (m), positive towards the opposite bank. */
@@ -141,22 +150,38 @@ public final class Section {
     double depth = depthM[ensemble];
     double top = pass.topOfCellsM(ensemble);
     double cellSize = pass.cellSizeM(ensemble);
+    int[] cell = column.cell;
+    double[] uppers = column.upperM;
+    double[] lowers = column.lowerM;
+    double[] normals = column.normalMps;
+    double[] alongs = column.alongMps;
+    double normalSum = 0;
+    double alongSum = 0;
+    int cells = cell.length;
     int j = 0;
-    for (int k = 0; k < pass.maxCells(); k++) {
-      double upper = Math.min(depth, depth - (top + k * cellSize));
-      double lower = Math.max(0, depth - (top + (k + 1) * cellSize));
-      if (!pass.usable(ensemble, k) || !(upper > lower)) {
+    for (int k = 0; k < cells; k++) {
+      double upper = depth - (top + k * cellSize);
+      double lower = depth - (top + (k + 1) * cellSize);
+      upper = upper > depth ? depth : upper;
+      lower = lower < 0 ? 0 : lower;
+      if (!row.usable(k) || !(upper > lower)) {
         continue;
       }
       double east = row.eastMps(k) + boatEast;
       double north = row.northMps(k) + boatNorth;
-      column.cell[j] = k;
-      column.upperM[j] = upper;
-      column.lowerM[j] = lower;
-      column.normalMps[j] = line.normal(east, north);
-      column.alongMps[j] = line.along(east, north);
+      double normal = line.normal(east, north);
+      double along = line.along(east, north);
+      cell[j] = k;
+      uppers[j] = upper;
+      lowers[j] = lower;
+      normals[j] = normal;
+      alongs[j] = along;
+      normalSum += normal * (upper - lower);
+      alongSum += along * (upper - lower);
       j++;
     }
+    column.normalTransport = normalSum;
+    column.alongTransport = alongSum;
     column.size = j;
     column.depthM = depth;
   }
