@@ -218,17 +218,35 @@ class DistributionIT {
   }
 
   @Test
-  void takesTheThoroughCompilerForLongWork() throws Exception {
+  void leavesDigestingToTheThoroughCompilerWhereThereIsMuch() throws Exception {
     Path large = Files.createDirectory(folder.resolve("large one"));
     Files.createFile(large.resolve("measurement.json"));
-    String report = "-XX:+PrintFlagsFinal -XX:+UseSerialGC";
+    String report = "-XX:+PrintFlagsFinal -XX:+UseSerialGC -XX:+UnlockDiagnosticVMOptions";
     String quick = "TieredStopAtLevel                        = 1 ";
+    String directed = "compilers.json";
     String program = launcher(BUILT).toString();
-    Map<String, String> options = Map.of("CROSSREACH_JAVA_OPTS", report);
-    assertTrue(start(folder, options, program, "check", large.toString()).out().contains(quick));
-    assertFalse(start(folder, options, program, "archive", large.toString()).out().contains(quick));
-    Files.write(large.resolve("pass-01.csv"), new byte[110_000_000]);
-    assertFalse(start(folder, options, program, "check", large.toString()).out().contains(quick));
+    Map<String, String> options = Map.of("CROSSREACH_JAVA_OPTS", report + " -XX:+DisplayVMOutput");
+    String small = start(folder, options, program, "check", large.toString()).out();
+    assertTrue(small.contains(quick) && !small.contains(directed), small);
+    String batch = start(folder, options, program, "archive", large.toString()).out();
+    assertTrue(batch.contains(directed) && !batch.contains(quick), batch);
+    Files.write(large.resolve("pass-01.csv"), new byte[21_000_000]);
+    String much = start(folder, options, program, "check", large.toString()).out();
+    assertTrue(much.contains(directed) && !much.contains(quick), much);
+  }
+
+  @Test
+  void saysNothingOfCompilersInAResult() throws Exception {
+    Path copy = folder.resolve("much of it");
+    Files.createDirectory(copy);
+    try (Stream<Path> files = Files.list(EXAMPLE)) {
+      for (Path file : files.toList()) {
+        Files.copy(file, copy.resolve(file.getFileName()));
+      }
+    }
+    Files.write(copy.resolve("ballast"), new byte[21_000_000]);
+    assertReduced(
+        start(folder, Map.of(), launcher(BUILT).toString(), "reduce", copy.toString(), "--json"));
   }
 
   @Test
