@@ -4,6 +4,7 @@ import java.io.IOException;
 import java.nio.file.DirectoryIteratorException;
 import java.nio.file.DirectoryStream;
 import java.nio.file.Files;
+import java.nio.file.InvalidPathException;
 import java.nio.file.Path;
 import java.util.ArrayDeque;
 import java.util.ArrayList;
@@ -87,21 +88,47 @@ public final class Finder {
   }
 
   /**
-   * Takes folders from a list. The place of a measurement is its path as listed, without what leads
-   * out of a folder or to the root of the file system.
+   * Takes folders from a list, each real folder once and as it is written first. The place of a
+   * measurement is its path as listed, without what leads out of a folder or to the root of the
+   * file system.
    *
-   * @param folders the folders, each a measurement
+   * @param lines the paths of the folders, each a measurement
    */
-  public void take(List<Path> folders) {
-    for (Path folder : folders) {
-      List<String> names = new ArrayList<>();
-      for (Path part : folder.normalize()) {
-        if (!part.toString().equals("..") && !part.toString().isEmpty()) {
-          names.add(part.toString());
+  public void take(List<String> lines) {
+    for (String line : lines) {
+      try {
+        Path folder = Path.of(line);
+        if (seen.add(real(folder))) {
+          add(new Found(folder, listedPlace(folder)));
         }
+      } catch (InvalidPathException noPath) {
+        troubles.add(noPath.getReason() + " in the list: " + printable(line));
       }
-      add(new Found(folder, names.isEmpty() ? name(folder) : String.join("/", names)));
     }
+  }
+
+  private static Path real(Path folder) {
+    try {
+      return folder.toRealPath();
+    } catch (IOException missing) {
+      return folder.toAbsolutePath().normalize();
+    }
+  }
+
+  private static String listedPlace(Path folder) {
+    List<String> names = new ArrayList<>();
+    for (Path part : folder.normalize()) {
+      if (!part.toString().equals("..") && !part.toString().isEmpty()) {
+        names.add(part.toString());
+      }
+    }
+    return names.isEmpty() ? name(folder) : String.join("/", names);
+  }
+
+  private static String printable(String line) {
+    StringBuilder shown = new StringBuilder();
+    line.chars().forEach(c -> shown.append(Character.isISOControl(c) ? '?' : (char) c));
+    return shown.toString();
   }
 
   private void add(Found each) {

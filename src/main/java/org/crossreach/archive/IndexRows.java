@@ -24,6 +24,40 @@ import org.crossreach.survey.Note;
  */
 record IndexRows(Map<String, Object> measurement, List<Map<String, Object>> passes) {
 
+  /** Names of the values of a measurement, in order. */
+  static final List<String> MEASUREMENT =
+      List.of(
+          "id",
+          "site",
+          "river",
+          "start_time",
+          "passes_used",
+          "discharge_m3s",
+          "sd_m3s",
+          "cov_pct",
+          "ci95_half_m3s",
+          "width_m",
+          "area_m2",
+          "mean_velocity_mps",
+          "exposure_s",
+          "cautions",
+          "faults");
+
+  /** Names of the values of a pass, in order. */
+  static final List<String> PASS =
+      List.of(
+          "pass",
+          "start_bank",
+          "used",
+          "start_time",
+          "duration_s",
+          "discharge_m3s",
+          "deviation_pct",
+          "width_m",
+          "area_m2",
+          "mean_velocity_mps",
+          "filled_discharge_pct");
+
   static IndexRows of(Result result) {
     Measurement facts = result.reduction().measurement();
     Summary summary = result.summary();

@@ -1,6 +1,7 @@
 package org.crossreach.archive;
 
 import java.io.IOException;
+import java.nio.file.InvalidPathException;
 import java.util.ArrayList;
 import java.util.HashSet;
 import java.util.List;
@@ -24,14 +25,32 @@ import org.crossreach.survey.UnusableInput;
 record Keeper(Plan plan) {
 
   /**
-   * Keeps a measurement; whatever is wrong with it becomes its outcome.
+   * Keeps a measurement; whatever is wrong with it or with its place alone becomes its outcome.
    *
    * @throws CannotKeep when the archive cannot be written
    */
   Outcome keep(Found found) throws CannotKeep {
-    Place place = new Place(plan.target().resolve(found.place()));
+    try {
+      return keep(found, new Place(plan.target().resolve(found.place())));
+    } catch (InvalidPathException unwritable) {
+      return new Outcome(
+          found.place(),
+          Outcome.Kind.FAILED,
+          0,
+          List.of("no file can have its name here: " + unwritable.getReason()));
+    } catch (CannotKeep trouble) {
+      if (!new Place(plan.target()).takesFiles()) {
+        throw trouble;
+      }
+      return new Outcome(
+          found.place(), Outcome.Kind.FAILED, 0, List.of("cannot write " + trouble.getMessage()));
+    }
+  }
+
+  private Outcome keep(Found found, Place place) throws CannotKeep {
     Optional<Manifest> before = Manifest.read(place.folder());
     if (before.isPresent() && before.get().holds(plan, found, place.folder())) {
+      place.sweep();
       int passes = before.get().rows().orElseThrow().passes().size();
       return new Outcome(found.place(), Outcome.Kind.UNCHANGED, passes, List.of());
     }
@@ -84,7 +103,7 @@ record Keeper(Plan plan) {
     }
     List<Place.Kept> inputs =
         result.reduction().measurement().inputs().stream()
-            .map(input -> new Place.Kept(input.file(), -1, input.sha256()))
+            .map(input -> new Place.Kept(input.file(), input.bytes(), input.sha256()))
             .toList();
     removeOthers(place, before, products);
     keepManifest(place, found, inputs, products, List.of(), Optional.of(IndexRows.of(result)));

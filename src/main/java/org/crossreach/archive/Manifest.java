@@ -21,7 +21,7 @@ import org.crossreach.report.ProgramVersion;
  * @param kinds kinds of files, as one text
  * @param units units of what people read
  * @param overriding choices in place of the measurement's own, as one text
- * @param inputs every file that was read; a size of -1 was not recorded
+ * @param inputs every file that was read
  * @param products every file that was written beside the manifest
  * @param problems why nothing could be made of it; empty when it is done
  * @param rows what the index says about it
@@ -48,6 +48,11 @@ record Manifest(
 
   boolean done() {
     return rows.isPresent();
+  }
+
+  /** What became of the measurement, as one word. */
+  String outcome() {
+    return done() ? "done" : "failed";
   }
 
   /** Whether it still holds: made by the same program and plan, from the same bytes, all there. */
@@ -84,7 +89,7 @@ record Manifest(
           json.text("kinds", kinds);
           json.text("units", units);
           json.text("overriding", overriding);
-          json.text("outcome", done() ? "done" : "failed");
+          json.text("outcome", outcome());
           json.texts("problems", problems);
           json.objects("inputs", inputs, each -> kept("file", each, json));
           json.objects("products", products, each -> kept("file", each, json));
@@ -96,9 +101,7 @@ record Manifest(
 
   private static void kept(String key, Place.Kept kept, JsonText json) throws IOException {
     json.text(key, kept.name());
-    if (kept.size() >= 0) {
-      json.whole("bytes", kept.size());
-    }
+    json.whole("bytes", kept.size());
     json.text("sha256", kept.sha256());
   }
 
@@ -135,9 +138,7 @@ record Manifest(
     for (JsonFields each : files) {
       all.add(
           new Place.Kept(
-              each.text("file"),
-              each.whole("bytes", -1, Long.MAX_VALUE >> 1, -1),
-              each.text("sha256")));
+              each.text("file"), each.whole("bytes", 0, Long.MAX_VALUE >> 1), each.text("sha256")));
     }
     return all;
   }

@@ -5,6 +5,7 @@ import java.io.IOException;
 import java.io.InputStream;
 import java.io.OutputStream;
 import java.io.UncheckedIOException;
+import java.nio.file.DirectoryIteratorException;
 import java.nio.file.DirectoryStream;
 import java.nio.file.Files;
 import java.nio.file.Path;
@@ -30,6 +31,8 @@ final class Place {
   private static final String ENDING = ".part";
   private static final String WRITER = host() + "." + ProcessHandle.current().pid();
   private static final int LONGEST_NAME = 200;
+  private static final String PROBE = ".probe";
+  private static final int PROBE_SIZE = 1 << 20;
 
   private final Path folder;
 
@@ -48,15 +51,22 @@ final class Place {
   void open() throws CannotKeep {
     try {
       Files.createDirectories(folder);
-      try (DirectoryStream<Path> left = Files.newDirectoryStream(folder, ".*" + ENDING)) {
-        for (Path each : left) {
-          if (isAbandoned(each)) {
-            Files.deleteIfExists(each);
-          }
-        }
-      }
     } catch (IOException trouble) {
       throw new CannotKeep(folder.toString(), trouble);
+    }
+    sweep();
+  }
+
+  /** Removes what dead processes left in the folder, as far as that can be done. */
+  void sweep() {
+    try (DirectoryStream<Path> left = Files.newDirectoryStream(folder, ".*" + ENDING)) {
+      for (Path each : left) {
+        if (isAbandoned(each)) {
+          Files.deleteIfExists(each);
+        }
+      }
+    } catch (IOException | DirectoryIteratorException readOnly) {
+      return; // they take up room and do no harm
     }
   }
 
@@ -115,6 +125,17 @@ final class Place {
     }
   }
 
+  /** Whether files can be written here at all: tries it with one of some size. */
+  boolean takesFiles() {
+    try {
+      write(PROBE, stream -> stream.write(new byte[PROBE_SIZE]));
+      remove(PROBE);
+      return true;
+    } catch (CannotKeep refused) {
+      return false;
+    }
+  }
+
   /** Removes a file if it is there. */
   void remove(String name) throws CannotKeep {
     try {
@@ -129,7 +150,7 @@ final class Place {
     Path file = folder.resolve(kept.name());
     try {
       return Files.isRegularFile(file)
-          && (kept.size() < 0 || Files.size(file) == kept.size())
+          && Files.size(file) == kept.size()
           && sha256(file).equals(kept.sha256());
     } catch (IOException unreadable) {
       return false;

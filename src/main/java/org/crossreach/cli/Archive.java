@@ -167,15 +167,15 @@ final class Archive implements Callable<Integer> {
     return finder;
   }
 
-  private List<Path> list() throws IOException {
-    List<Path> folders = new ArrayList<>();
+  private List<String> list() throws IOException {
+    List<String> folders = new ArrayList<>();
     try (BufferedReader lines =
         from.equals("-")
             ? new BufferedReader(new InputStreamReader(System.in, StandardCharsets.UTF_8))
             : Files.newBufferedReader(Path.of(from))) {
       for (String line = lines.readLine(); line != null; line = lines.readLine()) {
         if (!line.isBlank()) {
-          folders.add(Path.of(line));
+          folders.add(line);
         }
       }
     }

@@ -6,6 +6,7 @@ import java.io.InterruptedIOException;
 import java.security.MessageDigest;
 import java.util.concurrent.ArrayBlockingQueue;
 import java.util.concurrent.BlockingQueue;
+import org.crossreach.survey.InputFile;
 
 /**
  * The bytes of a file, digested by SHA-256 on another core while they are read on this one.
@@ -30,6 +31,7 @@ final class DigestedStream extends InputStream {
   private Block current = END;
   private int at;
   private int blocks;
+  private long size;
 
   /** Some bytes of the file; in the hands of one thread at a time. */
   private static final class Block {
@@ -76,6 +78,7 @@ final class DigestedStream extends InputStream {
       Block next = blocks < BLOCKS ? new Block(new byte[BLOCK]) : digested.take();
       blocks = Math.min(BLOCKS, blocks + 1);
       next.size = file.readNBytes(next.bytes, 0, BLOCK);
+      size += next.size;
       at = 0;
       current = next.size == 0 ? END : next;
       if (current == END) {
@@ -99,11 +102,11 @@ final class DigestedStream extends InputStream {
   }
 
   /**
-   * Reads what is left and gives the digest of all bytes.
+   * Reads what is left and gives size and digest of all bytes.
    *
-   * @return SHA-256 as 64 lower-case hexadecimal digits
+   * @param name name of the file
    */
-  String sha256() throws IOException {
+  InputFile input(String name) throws IOException {
     while (next()) {
       at = current.size;
     }
@@ -112,7 +115,7 @@ final class DigestedStream extends InputStream {
     } catch (InterruptedException e) {
       throw interrupted();
     }
-    return StoredFile.hex(digest.digest());
+    return new InputFile(name, size, StoredFile.hex(digest.digest()));
   }
 
   private static InterruptedIOException interrupted() {

@@ -7,7 +7,6 @@ import java.io.InputStream;
 import java.io.UncheckedIOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
-import org.crossreach.survey.InputFile;
 import org.crossreach.survey.UnusableInput;
 
 /**
@@ -64,8 +63,7 @@ public final class EnsembleCsv {
     try (DigestedStream stored = new DigestedStream(bytes)) {
       EnsembleTable table = readTable(stored, packed, problems);
       problems.throwIfAny();
-      return new EnsembleFile(
-          table.build(), new InputFile(problems.file(), stored.sha256()), table.header().notes());
+      return new EnsembleFile(table.build(), stored.input(problems.file()), table.header().notes());
     }
   }
 

@@ -77,7 +77,7 @@ public final class MeasurementFolder {
 
   private MeasurementFile readMeasurementFile() throws UnusableInput, IOException {
     byte[] bytes = StoredFile.bytes(folder.resolve(MeasurementFile.NAME), problems);
-    inputs.add(new InputFile(MeasurementFile.NAME, StoredFile.sha256(bytes)));
+    inputs.add(StoredFile.input(MeasurementFile.NAME, bytes));
     Optional<JsonNode> json = JsonTree.parse(bytes, problems);
     if (json.isEmpty()) {
       problems.throwIfAny();
@@ -94,7 +94,7 @@ public final class MeasurementFolder {
     file.passes().forEach(pass -> passes.add(pass.name()));
     try {
       byte[] bytes = StoredFile.bytes(path, settingsProblems);
-      inputs.add(new InputFile(SettingsFile.NAME, StoredFile.sha256(bytes)));
+      inputs.add(StoredFile.input(SettingsFile.NAME, bytes));
       SettingsFile.of(
           JsonTree.parse(bytes, settingsProblems), settingsProblems, Settings.defaults(), passes);
     } catch (UnusableInput e) {

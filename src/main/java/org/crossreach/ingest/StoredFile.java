@@ -8,6 +8,7 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.security.MessageDigest;
 import java.security.NoSuchAlgorithmException;
+import org.crossreach.survey.InputFile;
 import org.crossreach.survey.UnusableInput;
 
 /** A file on disk before anything is known of what it holds: that it is there, and its digest. */
@@ -82,9 +83,9 @@ final class StoredFile {
     }
   }
 
-  /** SHA-256 of some bytes, as hexadecimal digits. */
-  static String sha256(byte[] bytes) {
-    return hex(sha256().digest(bytes));
+  /** Size and digest of a file's bytes. */
+  static InputFile input(String name, byte[] bytes) {
+    return new InputFile(name, bytes.length, hex(sha256().digest(bytes)));
   }
 
   /** Bytes as lower-case hexadecimal digits. */

@@ -63,7 +63,8 @@ public final class JsonText implements AutoCloseable {
   }
 
   /** An array of objects as a member. */
-  public <T> void objects(String name, List<T> elements, Element<T> members) throws IOException {
+  public <T> void objects(String name, Iterable<T> elements, Element<T> members)
+      throws IOException {
     json.writeArrayFieldStart(name);
     for (T element : elements) {
       object(() -> members.write(element));

@@ -7,10 +7,7 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
-import java.util.Base64;
 import java.util.Map;
-import java.util.TreeMap;
-import java.util.stream.Stream;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
@@ -20,8 +17,6 @@ import org.junit.jupiter.api.io.TempDir;
  * the same bytes however the work was cut up.
  */
 class ArchiveTest {
-
-  private static final Path EXAMPLE = Path.of("formats/example");
 
   @TempDir Path folder;
   private Path tree;
@@ -38,14 +33,7 @@ class ArchiveTest {
   }
 
   private Path copy(String place) throws IOException {
-    Path copy = tree.resolve(place);
-    Files.createDirectories(copy);
-    try (Stream<Path> files = Files.list(EXAMPLE)) {
-      for (Path each : files.toList()) {
-        Files.copy(each, copy.resolve(each.getFileName().toString()));
-      }
-    }
-    return copy;
+    return new ExampleTree(tree).copy(place);
   }
 
   private Run archive(String... more) {
@@ -58,27 +46,15 @@ class ArchiveTest {
     return Run.of(words);
   }
 
-  private static Map<String, String> bytes(Path root) throws IOException {
-    Map<String, String> all = new TreeMap<>();
-    try (Stream<Path> files = Files.walk(root)) {
-      for (Path each : files.filter(Files::isRegularFile).toList()) {
-        all.put(
-            root.relativize(each).toString(),
-            Base64.getEncoder().encodeToString(Files.readAllBytes(each)));
-      }
-    }
-    return all;
-  }
-
   @Test
   void keepsEveryMeasurementOnceAndThenLeavesItAlone() throws IOException {
     Run first = archive();
     assertEquals(ExitCode.DONE, first.code(), first.err());
     assertTrue(first.out().startsWith("6 done, 0 unchanged, 0 failed; 12 passes"), first.out());
-    Map<String, String> before = bytes(target);
+    Map<String, String> before = ExampleTree.bytes(target);
     Run second = archive();
     assertTrue(second.out().startsWith("0 done, 6 unchanged, 0 failed"), second.out());
-    assertEquals(before, bytes(target));
+    assertEquals(before, ExampleTree.bytes(target));
     assertEquals(7, Files.readString(target.resolve("index-measurements.csv")).lines().count());
     assertEquals(13, Files.readString(target.resolve("index-passes.csv")).lines().count());
   }
@@ -129,13 +105,13 @@ class ArchiveTest {
   }
 
   private void copyBack() throws IOException {
-    Files.copy(EXAMPLE.resolve("pass-02.csv"), tree.resolve("a/first/pass-02.csv"));
+    Files.copy(ExampleTree.EXAMPLE.resolve("pass-02.csv"), tree.resolve("a/first/pass-02.csv"));
   }
 
   @Test
   void shardsMakeTheSameAsOneRun() throws IOException {
     archive();
-    Map<String, String> whole = bytes(target);
+    Map<String, String> whole = ExampleTree.bytes(target);
     target = folder.resolve("in-shards");
     int done = 0;
     for (int k = 1; k <= 3; k++) {
@@ -145,7 +121,7 @@ class ArchiveTest {
     assertEquals(6, done);
     assertFalse(Files.exists(target.resolve("index.json")), "shards leave the index alone");
     Run.of("archive", "--index-only", "--out", target.toString());
-    assertEquals(whole, bytes(target));
+    assertEquals(whole, ExampleTree.bytes(target));
   }
 
   @Test

@@ -261,6 +261,18 @@ class DistributionIT {
   }
 
   @Test
+  void archivesNamesThatAreNotAsciiUnderALocaleThatIsNotInstalled() throws Exception {
+    Path script = folder.resolve("script");
+    Files.writeString(
+        script,
+        "mkdir tree && cp -r '%s' 'tree/Fluß-Übergang' && '%s' archive tree --out kept --write json"
+            .formatted(EXAMPLE, launcher(BUILT)));
+    Map<String, String> locale = Map.of("LC_ALL", "xx_XX.UTF-8");
+    Ended ended = start(folder, locale, "sh", script.toString());
+    assertEquals("1 done, 0 unchanged, 0 failed; 2 passes in kept\n", ended.out(), ended.err());
+  }
+
+  @Test
   void isQuietWhenTheReaderHasGone() throws Exception {
     Ended ended =
         start(

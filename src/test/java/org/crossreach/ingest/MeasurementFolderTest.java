@@ -117,7 +117,7 @@ class MeasurementFolderTest {
         names);
     for (var input : measurement.inputs()) {
       assertEquals(
-          StoredFile.sha256(Files.readAllBytes(folder.resolve(input.file()))), input.sha256());
+          StoredFile.input(input.file(), Files.readAllBytes(folder.resolve(input.file()))), input);
     }
   }
 

@@ -108,10 +108,10 @@ public record River(int ensembles, int cells, double noiseMps, double speed) {
 
   private static List<InputFile> inputs() {
     List<InputFile> inputs = new ArrayList<>();
-    inputs.add(new InputFile("measurement.json", "9f86d081884c7d65".repeat(4)));
-    inputs.add(new InputFile("settings.json", "60303ae22b998861".repeat(4)));
+    inputs.add(new InputFile("measurement.json", 1024, "9f86d081884c7d65".repeat(4)));
+    inputs.add(new InputFile("settings.json", 1024, "60303ae22b998861".repeat(4)));
     for (int p = 1; p <= 5; p++) {
-      inputs.add(new InputFile("pass-0" + p + ".csv", ("fd61a03af4f77d8" + p).repeat(4)));
+      inputs.add(new InputFile("pass-0" + p + ".csv", 1024, ("fd61a03af4f77d8" + p).repeat(4)));
     }
     return inputs;
   }
