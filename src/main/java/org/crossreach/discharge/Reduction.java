@@ -21,6 +21,14 @@ public record Reduction(
     notes = List.copyOf(notes);
   }
 
+  /** The passes on their lines, as they were before laws and exponent were chosen. */
+  public LaidMeasurement laid() {
+    return new LaidMeasurement(
+        measurement,
+        passes.stream().map(each -> new LaidPass(each.pass(), each.section())).toList(),
+        notes);
+  }
+
   /** The passes that count in the measurement's discharge. */
   public List<PassDischarge> used() {
     return passes.stream().filter(each -> each.pass().used()).toList();

@@ -47,17 +47,25 @@ public record Comparer(int threads) {
    * @throws UnusableInput as {@link Reducer#reduce}
    */
   public Comparison compare(Measurement measurement, Settings settings) throws UnusableInput {
-    Reducer reducer = new Reducer(threads);
-    LaidMeasurement laid = reducer.lay(measurement, settings);
+    return compare(new Reducer(threads).lay(measurement, settings), settings);
+  }
+
+  /** Compares what else could have been made of a measurement that is reduced already. */
+  public Comparison compare(Reduction reduction) {
+    return compare(reduction.laid(), reduction.settings());
+  }
+
+  private Comparison compare(LaidMeasurement laid, Settings settings) {
     List<ColumnFit> columns = Exponents.columns(laid, threads);
     Fits fits = new Fits(Exponents.passFits(columns, threads), Exponents.fitToAll(laid, columns));
     Map<ExponentRule, Exponents> exponents = fits.exponents(laid, settings.exponent().value());
     List<Combination> combinations = Combination.all();
     List<Reduction> reductions =
-        reducer.integrate(
-            laid,
-            combinations.stream().map(each -> each.in(settings)).toList(),
-            combinations.stream().map(each -> exponents.get(each.rule())).toList());
+        new Reducer(threads)
+            .integrate(
+                laid,
+                combinations.stream().map(each -> each.in(settings)).toList(),
+                combinations.stream().map(each -> exponents.get(each.rule())).toList());
     Result chosen = Result.of(reductions.get(combinations.indexOf(Combination.of(settings))));
     return new Judgement(chosen, reductions, hidden(laid, columns, exponents), fits)
         .comparison(laid);

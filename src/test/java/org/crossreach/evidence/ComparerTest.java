@@ -7,6 +7,7 @@ import java.util.stream.Stream;
 import org.crossreach.acceptance.Rivers;
 import org.crossreach.agreement.Result;
 import org.crossreach.discharge.Reducer;
+import org.crossreach.discharge.Reduction;
 import org.crossreach.profile.Zone;
 import org.crossreach.settings.BottomLaw;
 import org.crossreach.settings.ExponentRule;
@@ -136,6 +137,17 @@ class ComparerTest {
           each.combination().text());
     }
     assertEquals(0, comparison.of(comparison.chosenCombination()).changePct());
+  }
+
+  @Test
+  void comparesWhatIsReducedAlready() throws Exception {
+    Simulation simulation = Simulation.run(new Rivers().noise(NOISE).recipe());
+    Comparison anew = new Comparer(1).compare(simulation.measurement(), Settings.defaults());
+    Reduction reduction = new Reducer(1).reduce(simulation.measurement(), Settings.defaults());
+    Comparison later = new Comparer(1).compare(reduction);
+    assertEquals(anew.verdict(), later.verdict());
+    assertEquals(anew.top(), later.top());
+    assertEquals(anew.bottom(), later.bottom());
   }
 
   /** Without noise the right law misses nothing, and the chosen settings stay. */

@@ -19,6 +19,7 @@ public final class MeasurementPdf {
           new MeasurementFactsSection(),
           new PassesSection(),
           new AgreementSection(),
+          new ExtrapolationsSection(),
           new NotesSection(),
           new SettingsSection(),
           new InputsSection(),

@@ -11,6 +11,9 @@ import org.apache.pdfbox.pdmodel.PDDocument;
 import org.crossreach.agreement.Result;
 import org.crossreach.agreement.Spread;
 import org.crossreach.discharge.Reducer;
+import org.crossreach.evidence.CombinationResult;
+import org.crossreach.evidence.Comparer;
+import org.crossreach.evidence.Comparison;
 import org.crossreach.report.Decimals;
 import org.crossreach.report.chart.River;
 import org.crossreach.settings.Settings;
@@ -21,7 +24,10 @@ import org.crossreach.survey.Site;
 import org.junit.jupiter.api.Test;
 import org.verapdf.pdfa.flavours.PDFAFlavour;
 
-/** The PDF of a measurement conforms, and holds passes, spread, directions, notes and inputs. */
+/**
+ * The PDF of a measurement conforms, and holds passes, spread, directions, choices, notes and
+ * inputs.
+ */
 class MeasurementPdfTest {
 
   @Test
@@ -61,6 +67,22 @@ class MeasurementPdfTest {
         assertTrue(text.contains(one.of(pass.totalM3s())), text);
       }
       assertTrue(text.contains("drifting weed near the left bank"), text);
+    }
+  }
+
+  @Test
+  void saysWhatEveryOtherChoiceWouldGive() throws Exception {
+    Result result = River.usual().result();
+    Comparison comparison = new Comparer(1).compare(result.reduction());
+    Decimals two = new Decimals(2);
+    for (String text : PdfText.byEveryReader(MeasurementPdf.bytes(result, PdfOptions.defaults()))) {
+      assertTrue(
+          text.replaceAll("\\s+", " ").contains(comparison.verdict().sentence()),
+          comparison.verdict().sentence() + " is not in " + text);
+      for (CombinationResult each : comparison.combinations()) {
+        assertTrue(text.contains(two.signed(each.changePct())), each.combination().text());
+      }
+      assertTrue(text.contains("chosen"), text);
     }
   }
 
