@@ -37,7 +37,6 @@ record MeasurementFile(
   static final String NAME = "measurement.json";
   static final String FORMAT = "crossreach-measurement/1";
 
-  private static final int LONGEST_ID = 100;
   private static final PhysicalRange COEFFICIENT_A = new PhysicalRange(0, 1e6, "");
   private static final PhysicalRange EXPONENT_B = new PhysicalRange(0.01, 10, "");
 
@@ -61,7 +60,7 @@ record MeasurementFile(
     JsonFields instrument = root.object("instrument");
     MeasurementFile file =
         new MeasurementFile(
-            id(root),
+            Identity.of(root, "id"),
             root.findObject("site").map(MeasurementFile::site).orElse(NO_SITE),
             root.texts("party"),
             root.text("remarks", ""),
@@ -78,32 +77,6 @@ record MeasurementFile(
 
   private static final Site NO_SITE = new Site("", "", "", Double.NaN, Double.NaN);
   private static final Water FRESH_WATER = new Water(Double.NaN, 0);
-
-  private static String id(JsonFields root) {
-    String id = root.text("id");
-    if (root.has("id") && !isId(id)) {
-      root.refuse(
-          "id",
-          Quoted.of(id),
-          "letters, digits, hyphens, points and underscores, the first one a letter or digit",
-          "");
-    }
-    return id;
-  }
-
-  /** Whether a text can be the name of a measurement, and so of a file. */
-  private static boolean isId(String id) {
-    if (id.isEmpty() || id.length() > LONGEST_ID || !Character.isLetterOrDigit(id.charAt(0))) {
-      return false;
-    }
-    for (int i = 0; i < id.length(); i++) {
-      char character = id.charAt(i);
-      if (!Character.isLetterOrDigit(character) && "-._".indexOf(character) < 0) {
-        return false;
-      }
-    }
-    return true;
-  }
 
   private static Site site(JsonFields site) {
     return new Site(

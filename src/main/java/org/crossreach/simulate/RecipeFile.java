@@ -12,6 +12,7 @@ import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
 import org.crossreach.ingest.FileProblems;
+import org.crossreach.ingest.Identity;
 import org.crossreach.ingest.JsonFields;
 import org.crossreach.ingest.JsonNode;
 import org.crossreach.ingest.JsonTree;
@@ -77,7 +78,7 @@ public final class RecipeFile {
     EdgePlan right = bank(river.findObject("right_bank"));
     JsonFields measurement = root.object("measurement");
     return new Recipe(
-        root.text("id"),
+        Identity.of(root, "id"),
         root.whole("seed", 0, Long.MAX_VALUE >> 11, 1),
         start(passes),
         (int) passes.whole("count", 1, 1000, 4),

@@ -15,6 +15,8 @@ import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
+import java.util.Set;
+import java.util.TreeSet;
 import java.util.stream.Stream;
 
 /** The published formats: pages, schemas and what stands in them. */
@@ -36,7 +38,11 @@ final class Format {
                       HOME + "settings.schema.json", text("settings.schema.json"),
                       HOME + "result.schema.json", text("result.schema.json"),
                       HOME + "comparison.schema.json", text("comparison.schema.json"),
-                      HOME + "check.schema.json", text("check.schema.json"))));
+                      HOME + "check.schema.json", text("check.schema.json"),
+                      HOME + "recipe.schema.json", text("recipe.schema.json"),
+                      HOME + "truth.schema.json", text("truth.schema.json"),
+                      HOME + "manifest.schema.json", text("manifest.schema.json"),
+                      HOME + "index.schema.json", text("index.schema.json"))));
 
   private Format() {}
 
@@ -79,6 +85,15 @@ final class Format {
     } catch (IOException unreadable) {
       throw new UncheckedIOException(unreadable);
     }
+  }
+
+  /** Every key that stands anywhere in the properties of a schema. */
+  static Set<String> keys(String schema) {
+    Set<String> keys = new TreeSet<>();
+    for (JsonNode properties : json(text(schema)).findValues("properties")) {
+      properties.fieldNames().forEachRemaining(keys::add);
+    }
+    return keys;
   }
 
   /** The blocks of a language in a page. */
