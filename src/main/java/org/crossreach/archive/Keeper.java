@@ -11,8 +11,10 @@ import org.crossreach.agreement.Result;
 import org.crossreach.discharge.Reducer;
 import org.crossreach.ingest.MeasurementFolder;
 import org.crossreach.ingest.SettingsFile;
+import org.crossreach.ingest.StoredInputs;
 import org.crossreach.report.FileKind;
 import org.crossreach.report.ProgramVersion;
+import org.crossreach.survey.InputFile;
 import org.crossreach.survey.Measurement;
 import org.crossreach.survey.Problem;
 import org.crossreach.survey.UnusableInput;
@@ -101,10 +103,7 @@ record Keeper(Plan plan) {
         products.add(place.write(file.name(), file.product()));
       }
     }
-    List<Place.Kept> inputs =
-        result.reduction().measurement().inputs().stream()
-            .map(input -> new Place.Kept(input.file(), input.bytes(), input.sha256()))
-            .toList();
+    List<InputFile> inputs = result.reduction().measurement().inputs();
     removeOthers(place, before, products);
     keepManifest(place, found, inputs, products, List.of(), Optional.of(IndexRows.of(result)));
   }
@@ -113,7 +112,8 @@ record Keeper(Plan plan) {
       throws CannotKeep {
     place.open();
     removeOthers(place, before, List.of());
-    keepManifest(place, found, List.of(), List.of(), problems, Optional.empty());
+    List<InputFile> inputs = StoredInputs.of(found.folder());
+    keepManifest(place, found, inputs, List.of(), problems, Optional.empty());
     return new Outcome(found.place(), Outcome.Kind.FAILED, 0, problems);
   }
 
@@ -134,7 +134,7 @@ record Keeper(Plan plan) {
   private void keepManifest(
       Place place,
       Found found,
-      List<Place.Kept> inputs,
+      List<InputFile> inputs,
       List<Place.Kept> products,
       List<String> problems,
       Optional<IndexRows> rows)
@@ -146,7 +146,9 @@ record Keeper(Plan plan) {
             plan.kindKeys(),
             plan.units().key(),
             plan.overriding(),
-            inputs,
+            inputs.stream()
+                .map(input -> new Place.Kept(input.file(), input.bytes(), input.sha256()))
+                .toList(),
             products,
             problems,
             rows);

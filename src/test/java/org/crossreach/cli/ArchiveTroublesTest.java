@@ -58,6 +58,25 @@ class ArchiveTroublesTest {
   }
 
   @Test
+  void namesTheInputsOfAMeasurementThatFailed() throws IOException {
+    Path torn = tree.root().resolve("a/first/pass-01.csv");
+    Files.writeString(torn, "torn");
+    Files.delete(tree.root().resolve("a/second/pass-02.csv"));
+    Files.writeString(tree.root().resolve("b/third/measurement.json"), "{");
+    assertEquals(ExitCode.FAULTS_FOUND, archive().code());
+    String first = Files.readString(target.resolve("a/first/manifest.json"));
+    assertTrue(first.contains("\"file\": \"pass-02.csv\""), first);
+    // echo -n torn | sha256sum
+    String digest = "00cc10cc5ab0a89fbf4d84a229bf234e739ba6294a832d2c042ce8d9a1949cf7";
+    assertTrue(first.contains("\"bytes\": 4,") && first.contains(digest), first);
+    String second = Files.readString(target.resolve("a/second/manifest.json"));
+    assertTrue(second.contains("\"file\": \"pass-01.csv\""), second);
+    assertFalse(second.contains("\"file\": \"pass-02.csv\""), second);
+    String third = Files.readString(target.resolve("b/third/manifest.json"));
+    assertTrue(third.contains("\"bytes\": 1,") && !third.contains("pass-01.csv"), third);
+  }
+
+  @Test
   void takesEachFolderOfAListOnceAndNamesLinesThatAreNoPaths() throws IOException {
     Path first = tree.root().resolve("a/first");
     Path alias = Files.createSymbolicLink(folder.resolve("alias"), first);
