@@ -10,6 +10,7 @@ import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
+import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.stream.Stream;
@@ -40,24 +41,11 @@ class DistributionIT {
     cache = folder.resolve("cache");
   }
 
-  /** What a process did. */
-  private record Ended(int code, String out, String err) {}
-
   private Ended start(Path from, Map<String, String> environment, String... words)
       throws Exception {
-    Path out = Files.createTempFile(folder, "out", "");
-    Path err = Files.createTempFile(folder, "err", "");
-    ProcessBuilder builder =
-        new ProcessBuilder(words)
-            .directory(from.toFile())
-            .redirectOutput(out.toFile())
-            .redirectError(err.toFile());
-    builder.environment().keySet().removeIf(name -> name.startsWith("CROSSREACH"));
-    builder.environment().put("CROSSREACH_CACHE", cache.toString());
-    builder.environment().putAll(environment);
-    builder.environment().values().removeIf(String::isEmpty);
-    int code = builder.start().waitFor();
-    return new Ended(code, Files.readString(out), Files.readString(err));
+    Map<String, String> all = new HashMap<>(Map.of("CROSSREACH_CACHE", cache.toString()));
+    all.putAll(environment);
+    return Ended.of(from, all, words);
   }
 
   private Ended reduce(Path launcher) throws Exception {
