@@ -1,6 +1,7 @@
 package org.crossreach.archive;
 
 import java.io.IOException;
+import org.crossreach.report.FileTrouble;
 
 /** A result could not be written to the archive; what was written before is whole. */
 public final class CannotKeep extends IOException {
@@ -11,7 +12,7 @@ public final class CannotKeep extends IOException {
     super(
         target
             + ": "
-            + (cause.getMessage() == null ? "writing failed" : cause.getMessage())
+            + FileTrouble.reason(cause)
             + "; nothing half-written was left under a final name",
         cause);
   }

@@ -2,6 +2,7 @@ package org.crossreach.cli;
 
 import java.io.IOException;
 import java.nio.file.Path;
+import org.crossreach.report.FileTrouble;
 
 /** An output that could not be written; every other {@link IOException} is taken for an input. */
 final class CannotWrite extends IOException {

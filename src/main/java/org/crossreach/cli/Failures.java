@@ -4,6 +4,7 @@ import java.io.IOException;
 import java.io.PrintWriter;
 import java.io.UncheckedIOException;
 import org.crossreach.report.CheckReport;
+import org.crossreach.report.FileTrouble;
 import org.crossreach.report.ProgramVersion;
 import org.crossreach.survey.Problem;
 import org.crossreach.survey.UnusableInput;

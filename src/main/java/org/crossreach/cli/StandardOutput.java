@@ -4,6 +4,7 @@ import java.io.FileDescriptor;
 import java.io.FileOutputStream;
 import java.io.IOException;
 import java.io.OutputStream;
+import org.crossreach.report.FileTrouble;
 
 /**
  * Standard output that remembers why it failed.

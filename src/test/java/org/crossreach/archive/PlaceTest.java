@@ -38,4 +38,13 @@ class PlaceTest {
       assertEquals(List.of(folder.resolve("passes.csv")), files.toList());
     }
   }
+
+  @Test
+  void saysInWordsWhyAPlaceCannotBe() throws IOException {
+    Path file = Files.writeString(folder.resolve("index.json"), "earlier");
+    CannotKeep stop = assertThrows(CannotKeep.class, () -> new Place(file).open());
+    assertEquals(
+        file + ": this exists already; nothing half-written was left under a final name",
+        stop.getMessage());
+  }
 }

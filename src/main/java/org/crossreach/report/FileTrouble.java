@@ -1,4 +1,4 @@
-package org.crossreach.cli;
+package org.crossreach.report;
 
 import java.io.FileNotFoundException;
 import java.io.IOException;
@@ -10,7 +10,7 @@ import java.nio.file.NoSuchFileException;
 import java.nio.file.NotDirectoryException;
 
 /** One line for a person out of an {@link IOException}, whose own message is often a bare path. */
-final class FileTrouble {
+public final class FileTrouble {
 
   private FileTrouble() {}
 
@@ -20,18 +20,21 @@ final class FileTrouble {
    * @param fallback what to name when the failure names no file
    * @param failure the failure
    */
-  static String describe(String fallback, IOException failure) {
+  public static String describe(String fallback, IOException failure) {
     if (failure instanceof FileSystemException trouble) {
-      String file = trouble.getFile() == null ? fallback : trouble.getFile();
-      return file + ": " + reason(trouble);
+      return (trouble.getFile() == null ? fallback : trouble.getFile()) + ": " + reason(trouble);
     }
-    String message = failure.getMessage() == null ? "input or output failed" : failure.getMessage();
+    String message = reason(failure);
     return failure instanceof FileNotFoundException || fallback.isEmpty()
         ? message
         : fallback + ": " + message;
   }
 
-  private static String reason(FileSystemException trouble) {
+  /** Why something failed, without the file, for example {@code this is not a folder}. */
+  public static String reason(IOException failure) {
+    if (!(failure instanceof FileSystemException trouble)) {
+      return failure.getMessage() == null ? "input or output failed" : failure.getMessage();
+    }
     if (trouble instanceof NoSuchFileException) {
       return "there is no such file or folder";
     }
