@@ -121,8 +121,7 @@ final class Archive implements Callable<Integer> {
       }
       Finder finder = find();
       List<Found> found = part.of(finder.found());
-      ArchiveProgress progress =
-          new ArchiveProgress(found.size(), quiet, spec.commandLine().getErr());
+      ArchiveProgress progress = new ArchiveProgress(found, quiet, spec.commandLine().getErr());
       try (progress) {
         finder.troubles().forEach(progress::trouble);
         new ArchiveRun(plan, progress).keep(found);

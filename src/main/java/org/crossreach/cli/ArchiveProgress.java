@@ -8,6 +8,7 @@ import me.tongfei.progressbar.ProgressBar;
 import me.tongfei.progressbar.ProgressBarBuilder;
 import me.tongfei.progressbar.ProgressBarStyle;
 import org.crossreach.archive.ArchiveRun;
+import org.crossreach.archive.Found;
 import org.crossreach.archive.Outcome;
 
 /**
@@ -18,25 +19,39 @@ final class ArchiveProgress implements ArchiveRun.Listener, AutoCloseable {
 
   private final PrintWriter err;
   private final boolean quiet;
+  private final StatusLine line;
   private final ProgressBar bar;
+  private final Workload workload;
+  private final TimeLeft left;
   private final List<String> failures = new ArrayList<>();
   private int done;
   private int unchanged;
   private int failed;
   private int passes;
 
-  ArchiveProgress(int measurements, boolean quiet, PrintWriter err) {
+  ArchiveProgress(List<Found> measurements, boolean quiet, PrintWriter err) {
     this.err = err;
     this.quiet = quiet;
-    this.bar =
-        quiet || System.console() == null
-            ? null
-            : new ProgressBarBuilder()
-                .setTaskName("archive")
-                .setInitialMax(measurements)
-                .setStyle(ProgressBarStyle.ASCII)
-                .showSpeed()
-                .build();
+    if (quiet || System.console() == null) {
+      line = null;
+      bar = null;
+      workload = null;
+      left = null;
+      return;
+    }
+    workload = Workload.of(measurements);
+    left = new TimeLeft(workload.whole(), System.nanoTime());
+    line = new StatusLine(err);
+    bar =
+        new ProgressBarBuilder()
+            .setTaskName("archive")
+            .setInitialMax(measurements.size())
+            .setStyle(ProgressBarStyle.ASCII)
+            .setEtaFunction(state -> left.at(System.nanoTime()))
+            .setConsumer(line)
+            .continuousUpdate()
+            .showSpeed()
+            .build();
   }
 
   @Override
@@ -48,6 +63,7 @@ final class ArchiveProgress implements ArchiveRun.Listener, AutoCloseable {
       case FAILED -> failed++;
     }
     if (bar != null) {
+      left.finished(workload.sizes().get(outcome.place()), System.nanoTime());
       bar.step();
     } else if (!quiet && outcome.kind() != Outcome.Kind.FAILED) {
       err.println(outcome.place() + ": " + outcome.kind().name().toLowerCase(Locale.ROOT));
@@ -58,14 +74,18 @@ final class ArchiveProgress implements ArchiveRun.Listener, AutoCloseable {
   }
 
   /** Tells of something that could not be looked into; it counts as a failure. */
-  void trouble(String line) {
+  void trouble(String text) {
     failed++;
-    failure(line);
+    failure(text);
   }
 
-  private void failure(String line) {
-    failures.add(line);
-    err.println(line);
+  private void failure(String text) {
+    failures.add(text);
+    if (line == null) {
+      err.println(text);
+    } else {
+      line.above(text);
+    }
   }
 
   int done() {
