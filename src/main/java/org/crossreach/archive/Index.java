@@ -21,16 +21,13 @@ public final class Index {
   /** Name and version of the format. */
   public static final String FORMAT = "crossreach-index/1";
 
-  /** How often the index is made again because another run keeps adding to the archive. */
-  private static final int MOST_ATTEMPTS = 3;
-
   private Index() {}
 
   /**
    * Writes the index of an archive, reading one manifest at a time.
    *
-   * <p>Of two runs that end together each looks again after it has written, so that the last index
-   * has the measurements of both.
+   * <p>Of runs that end together each waits for its turn, so that the last index has the
+   * measurements of all.
    *
    * @param target folder of the archive
    * @throws CannotKeep when it cannot be written
@@ -38,13 +35,14 @@ public final class Index {
   public static void write(Path target) throws IOException {
     Place folder = new Place(target);
     folder.open();
-    boolean complete = false;
-    for (int attempt = 0; attempt < MOST_ATTEMPTS && !complete; attempt++) {
+    IndexTurn turn = IndexTurn.await(target);
+    try {
       Manifests manifests = Manifests.in(target);
       folder.write("index.json", stream -> json(manifests, stream));
       folder.write("index-measurements.csv", stream -> measurements(manifests, stream));
       folder.write("index-passes.csv", stream -> passes(manifests, stream));
-      complete = Manifests.in(target).places().equals(manifests.places());
+    } finally {
+      turn.end();
     }
   }
 

@@ -6,24 +6,23 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.nio.file.SimpleFileVisitor;
 import java.nio.file.attribute.BasicFileAttributes;
-import java.nio.file.attribute.FileTime;
 import java.util.Iterator;
 import java.util.Optional;
-import java.util.SortedMap;
-import java.util.TreeMap;
+import java.util.SortedSet;
+import java.util.TreeSet;
 
 /**
  * The manifests below a folder in the order of their places, each read when it is asked for, so
  * that there may be any number of them.
  *
  * @param target the folder
- * @param places when the manifest of each place was written
+ * @param places the places that have one
  */
-record Manifests(Path target, SortedMap<String, FileTime> places) implements Iterable<Manifest> {
+record Manifests(Path target, SortedSet<String> places) implements Iterable<Manifest> {
 
   /** The manifests that are there now; none when there is no such folder. */
   static Manifests in(Path target) throws IOException {
-    SortedMap<String, FileTime> places = new TreeMap<>();
+    SortedSet<String> places = new TreeSet<>();
     if (Files.isDirectory(target)) {
       Files.walkFileTree(target, new Walk(target, places));
     }
@@ -33,7 +32,7 @@ record Manifests(Path target, SortedMap<String, FileTime> places) implements Ite
   /** Those that can be read; one that has gone since is passed over. */
   @Override
   public Iterator<Manifest> iterator() {
-    return places.keySet().stream()
+    return places.stream()
         .map(place -> Manifest.read(target.resolve(place)))
         .flatMap(Optional::stream)
         .iterator();
@@ -41,9 +40,9 @@ record Manifests(Path target, SortedMap<String, FileTime> places) implements Ite
 
   private static final class Walk extends SimpleFileVisitor<Path> {
     private final Path target;
-    private final SortedMap<String, FileTime> places;
+    private final SortedSet<String> places;
 
-    Walk(Path target, SortedMap<String, FileTime> places) {
+    Walk(Path target, SortedSet<String> places) {
       this.target = target;
       this.places = places;
     }
@@ -53,7 +52,7 @@ record Manifests(Path target, SortedMap<String, FileTime> places) implements Ite
       if (file.getFileName().toString().equals(Manifest.NAME)) {
         String place = target.relativize(file.getParent()).toString();
         String separator = file.getFileSystem().getSeparator();
-        places.put(place.replace(separator, "/"), attributes.lastModifiedTime());
+        places.add(place.replace(separator, "/"));
       }
       return FileVisitResult.CONTINUE;
     }
