@@ -11,7 +11,6 @@ import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.EnumSet;
 import java.util.List;
-import java.util.concurrent.Callable;
 import org.crossreach.archive.ArchiveRun;
 import org.crossreach.archive.CannotKeep;
 import org.crossreach.archive.Finder;
@@ -24,90 +23,82 @@ import org.crossreach.report.FileKind;
 import org.crossreach.report.Units;
 import org.crossreach.settings.Settings;
 import org.crossreach.survey.UnusableInput;
-import picocli.CommandLine.Command;
-import picocli.CommandLine.Mixin;
-import picocli.CommandLine.Model.CommandSpec;
-import picocli.CommandLine.Option;
-import picocli.CommandLine.ParameterException;
-import picocli.CommandLine.Parameters;
-import picocli.CommandLine.Spec;
 
 /** Keeps every measurement it finds: reports, tables, manifests and one index. */
-@Command(
-    name = "archive",
-    description =
-        "Find measurements, keep the reports and tables of each, and an index of all; what is kept"
-            + " already is not done again.")
-final class Archive implements Callable<Integer> {
+final class Archive implements Job {
 
-  @Parameters(
-      arity = "0..*",
-      paramLabel = "ROOT",
-      description = "Folders to look through for measurements.")
-  private List<Path> roots = List.of();
+  private final Usage usage =
+      new Usage(
+          "archive",
+          "Find measurements, keep the reports and tables of each, and an index of all; what is"
+              + " kept already is not done again.",
+          this);
 
-  @Option(
-      names = "--from",
-      order = 1,
-      paramLabel = "FILE",
-      description = "Take the measurement folders from a list, one in a line; - is standard input.")
-  private String from;
+  private final Given<List<Path>> roots =
+      usage.operands(0, "ROOT", Path.class, "Folders to look through for measurements.");
 
-  @Option(
-      names = "--out",
-      order = 2,
-      paramLabel = "DIR",
-      defaultValue = "reports",
-      description = "Folder of the archive (default: reports).")
-  private Path target;
+  private final Given<String> from =
+      usage.option(
+          "--from",
+          "FILE",
+          String.class,
+          null,
+          "Take the measurement folders from a list, one in a line; - is standard input.");
 
-  @Option(
-      names = "--write",
-      order = 3,
-      split = ",",
-      paramLabel = "KIND",
-      description =
+  private final Given<Path> target =
+      usage.option(
+          "--out",
+          "DIR",
+          Path.class,
+          Path.of("reports"),
+          "Folder of the archive (default: reports).");
+
+  private final Given<List<FileKind>> kinds =
+      usage.list(
+          "--write",
+          "KIND",
+          FileKind.class,
+          List.of(FileKind.CSV, FileKind.PDF),
           "Kinds of files, with commas between them: json, csv, pdf, png, svg (default:"
-              + " json,csv,pdf).")
-  private List<FileKind> kinds = List.of(FileKind.CSV, FileKind.PDF);
+              + " json,csv,pdf).");
 
-  @Option(
-      names = "--jobs",
-      order = 4,
-      paramLabel = "N",
-      description = "Measurements worked on side by side (default: one for each processor).")
-  private int jobs = Runtime.getRuntime().availableProcessors();
+  private final Given<Integer> jobs =
+      usage.option(
+          "--jobs",
+          "N",
+          Integer.class,
+          Runtime.getRuntime().availableProcessors(),
+          "Measurements worked on side by side (default: one for each processor).");
 
-  @Option(
-      names = "--shard",
-      order = 5,
-      paramLabel = "K/N",
-      description = "Do the K-th of N parts of the work only; the index is then left alone.")
-  private String shard;
+  private final Given<String> shard =
+      usage.option(
+          "--shard",
+          "K/N",
+          String.class,
+          null,
+          "Do the K-th of N parts of the work only; the index is then left alone.");
 
-  @Option(
-      names = "--index-only",
-      order = 6,
-      description = "Only make the index anew from what is in the archive.")
-  private boolean indexOnly;
+  private final Given<Boolean> indexOnly =
+      usage.flag("--index-only", "Only make the index anew from what is in the archive.");
 
-  @Mixin private ChoiceOptions choices;
+  private final ChoiceOptions choices = new ChoiceOptions(usage);
 
-  @Option(
-      names = "--units",
-      order = 80,
-      paramLabel = "si|us",
-      defaultValue = "si",
-      description = "Units of the pages: SI or US customary (default: si).")
-  private Units units;
+  private final Given<Units> units =
+      usage.option(
+          "--units",
+          "si|us",
+          Units.class,
+          Units.SI,
+          "Units of the pages: SI or US customary (default: si).");
 
-  @Option(names = "--json", order = 90, description = "Print the summary as JSON.")
-  private boolean json;
+  private final Given<Boolean> json = usage.flag("--json", "Print the summary as JSON.");
 
-  @Option(names = "--quiet", order = 93, description = "No progress; failures still appear.")
-  private boolean quiet;
+  private final Given<Boolean> quiet = usage.flag("--quiet", "No progress; failures still appear.");
 
-  @Spec private CommandSpec spec;
+  @Override
+  public Usage usage() {
+    return usage;
+  }
 
   @Override
   public Integer call() throws UnusableInput, IOException {
@@ -115,51 +106,55 @@ final class Archive implements Callable<Integer> {
     Plan plan = plan();
     Shard part = part();
     try {
-      if (indexOnly) {
-        Index.write(target);
+      if (indexOnly.value()) {
+        Index.write(target.value());
         return ExitCode.DONE;
       }
       Finder finder = find();
       List<Found> found = part.of(finder.found());
-      ArchiveProgress progress = new ArchiveProgress(found, quiet, spec.commandLine().getErr());
+      ArchiveProgress progress = new ArchiveProgress(found, quiet.value(), usage.err());
       try (progress) {
         finder.troubles().forEach(progress::trouble);
         new ArchiveRun(plan, progress).keep(found);
-        if (shard == null) {
-          Index.write(target);
+        if (shard.value() == null) {
+          Index.write(target.value());
         }
       }
       print(progress);
       return progress.failed() > 0 ? ExitCode.FAULTS_FOUND : ExitCode.DONE;
     } catch (CannotKeep trouble) {
-      throw new CannotWrite(target.toString(), trouble.getMessage());
+      throw new CannotWrite(target.value().toString(), trouble.getMessage());
     }
   }
 
   private Shard part() {
     try {
-      return shard == null ? Shard.WHOLE : Shard.parse(shard);
+      return shard.value() == null ? Shard.WHOLE : Shard.parse(shard.value());
     } catch (IllegalArgumentException wrong) {
-      throw new ParameterException(spec.commandLine(), wrong.getMessage());
+      throw usage.wrong(wrong.getMessage());
     }
   }
 
   private Plan plan() {
     try {
-      return new Plan(target, EnumSet.copyOf(kinds), units, jobs, choices.asJson());
+      return new Plan(
+          target.value(),
+          EnumSet.copyOf(kinds.value()),
+          units.value(),
+          jobs.value(),
+          choices.asJson());
     } catch (IllegalArgumentException wrong) {
-      throw new ParameterException(spec.commandLine(), wrong.getMessage());
+      throw usage.wrong(wrong.getMessage());
     }
   }
 
   private Finder find() throws IOException {
-    if (roots.isEmpty() == (from == null)) {
-      throw new ParameterException(
-          spec.commandLine(), "Give folders to look through, or a list with --from");
+    if (roots.value().isEmpty() == (from.value() == null)) {
+      throw usage.wrong("Give folders to look through, or a list with --from");
     }
     Finder finder = new Finder();
-    if (from == null) {
-      finder.look(roots);
+    if (from.value() == null) {
+      finder.look(roots.value());
     } else {
       finder.take(list());
     }
@@ -169,9 +164,9 @@ final class Archive implements Callable<Integer> {
   private List<String> list() throws IOException {
     List<String> folders = new ArrayList<>();
     try (BufferedReader lines =
-        from.equals("-")
+        from.value().equals("-")
             ? new BufferedReader(new InputStreamReader(System.in, StandardCharsets.UTF_8))
-            : Files.newBufferedReader(Path.of(from))) {
+            : Files.newBufferedReader(Path.of(from.value()))) {
       for (String line = lines.readLine(); line != null; line = lines.readLine()) {
         if (!line.isBlank()) {
           folders.add(line);
@@ -182,14 +177,14 @@ final class Archive implements Callable<Integer> {
   }
 
   private void print(ArchiveProgress progress) throws IOException {
-    PrintWriter out = spec.commandLine().getOut();
-    if (json) {
+    PrintWriter out = usage.out();
+    if (json.value()) {
       ByteArrayOutputStream bytes = new ByteArrayOutputStream();
       try (JsonText text = new JsonText(bytes)) {
         text.object(
             () -> {
               text.text("format", "crossreach-archive/1");
-              text.text("target", target.toString());
+              text.text("target", target.value().toString());
               text.whole("done", progress.done());
               text.whole("unchanged", progress.unchanged());
               text.whole("failed", progress.failed());
@@ -208,7 +203,7 @@ final class Archive implements Callable<Integer> {
               + " failed; "
               + progress.passes()
               + " passes in "
-              + target);
+              + target.value());
     }
     out.flush();
   }

@@ -7,29 +7,28 @@ import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
 import java.util.List;
 import java.util.Optional;
-import java.util.concurrent.Callable;
 import org.crossreach.ingest.MeasurementFolder;
 import org.crossreach.report.CheckReport;
 import org.crossreach.survey.UnusableInput;
-import picocli.CommandLine.Command;
-import picocli.CommandLine.Model.CommandSpec;
-import picocli.CommandLine.Option;
-import picocli.CommandLine.Parameters;
-import picocli.CommandLine.Spec;
 
 /** Reads everything of a measurement, computes nothing, and lists every problem with its place. */
-@Command(
-    name = "check",
-    description = "Read everything, compute nothing, and list every problem with its place.")
-final class Check implements Callable<Integer> {
+final class Check implements Job {
 
-  @Parameters(paramLabel = "FOLDER", description = "The folder of the measurement.")
-  private Path folder;
+  private final Usage usage =
+      new Usage(
+          "check",
+          "Read everything, compute nothing, and list every problem with its place.",
+          this);
 
-  @Option(names = "--json", order = 90, description = "Print the list as JSON, for machines.")
-  private boolean json;
+  private final Given<Path> folder =
+      usage.operand("FOLDER", Path.class, "The folder of the measurement.");
 
-  @Spec private CommandSpec spec;
+  private final Given<Boolean> json = usage.flag("--json", "Print the list as JSON, for machines.");
+
+  @Override
+  public Usage usage() {
+    return usage;
+  }
 
   @Override
   public Integer call() throws IOException {
@@ -40,15 +39,15 @@ final class Check implements Callable<Integer> {
 
   private CheckReport read() throws IOException {
     try {
-      return new CheckReport(Optional.of(MeasurementFolder.read(folder)), List.of());
+      return new CheckReport(Optional.of(MeasurementFolder.read(folder.value())), List.of());
     } catch (UnusableInput unusable) {
       return new CheckReport(Optional.empty(), unusable.problems());
     }
   }
 
   private void print(CheckReport report) throws IOException {
-    PrintWriter out = spec.commandLine().getOut();
-    if (json) {
+    PrintWriter out = usage.out();
+    if (json.value()) {
       ByteArrayOutputStream text = new ByteArrayOutputStream();
       report.writeJson(text);
       out.print(text.toString(StandardCharsets.UTF_8));

@@ -5,95 +5,81 @@ import java.util.Map;
 import org.crossreach.ingest.SettingsFile;
 import org.crossreach.settings.Settings;
 import org.crossreach.survey.UnusableInput;
-import picocli.CommandLine.Option;
 
 /**
  * The options that overrule choices of {@code settings.json}.
  *
- * <p>All of them say the same as a {@code settings.json} would, and are read by the same reader.
+ * <p>All of them say the same as a {@code settings.json} would, and are read by the same reader. An
+ * option of its own wins over {@code --set} with the same key.
  */
 final class ChoiceOptions {
 
-  private final Map<String, String> chosen = new LinkedHashMap<>();
+  private final Given<String> method;
+  private final Given<String> section;
+  private final Given<String> depth;
+  private final Given<String> top;
+  private final Given<String> bottom;
+  private final Given<String> exponent;
+  private final Given<String> edgeEnsembles;
+  private final Given<Map<String, String>> any;
 
-  @Option(
-      names = "--method",
-      order = 10,
-      paramLabel = "NAME",
-      description = "section-normal or path-flux.")
-  private void setMethod(String key) {
-    chosen.put("method", key);
+  ChoiceOptions(Usage usage) {
+    method = choice(usage, "--method", "NAME", "section-normal or path-flux.");
+    section =
+        choice(
+            usage,
+            "--section",
+            "LINE",
+            "each-pass, common, or an azimuth in degrees from true north.");
+    depth = choice(usage, "--depth", "SOURCE", "slant-mean, slant-inverse-distance or vertical.");
+    top = choice(usage, "--top", "LAW", "power, constant or three-point.");
+    bottom = choice(usage, "--bottom", "LAW", "power or no-slip.");
+    exponent =
+        choice(
+            usage,
+            "--exponent",
+            "NUMBER|RULE",
+            "A fixed exponent such as 0.1667, or fit-pass or fit-all.");
+    edgeEnsembles =
+        choice(usage, "--edge-ensembles", "N", "Number of ensembles averaged beside each edge.");
+    any =
+        usage.pairs(
+            "--set",
+            "KEY=VALUE",
+            "Any choice by its key in settings.json, for example screening.spikes_mps=off; may be"
+                + " repeated.");
   }
 
-  @Option(
-      names = "--section",
-      order = 11,
-      paramLabel = "LINE",
-      description = "each-pass, common, or an azimuth in degrees from true north.")
-  private void setSection(String line) {
-    boolean azimuth = !line.isEmpty() && "+-.0123456789".indexOf(line.charAt(0)) >= 0;
-    chosen.put(azimuth ? "section.line.azimuth_deg" : "section.line", line);
-  }
-
-  @Option(
-      names = "--depth",
-      order = 12,
-      paramLabel = "SOURCE",
-      description = "slant-mean, slant-inverse-distance or vertical.")
-  private void setDepth(String key) {
-    chosen.put("depth.source", key);
-  }
-
-  @Option(
-      names = "--top",
-      order = 13,
-      paramLabel = "LAW",
-      description = "power, constant or three-point.")
-  private void setTop(String key) {
-    chosen.put("top", key);
-  }
-
-  @Option(names = "--bottom", order = 14, paramLabel = "LAW", description = "power or no-slip.")
-  private void setBottom(String key) {
-    chosen.put("bottom", key);
-  }
-
-  @Option(
-      names = "--exponent",
-      order = 15,
-      paramLabel = "NUMBER|RULE",
-      description = "A fixed exponent such as 0.1667, or fit-pass or fit-all.")
-  private void setExponent(String exponent) {
-    boolean number = !exponent.isEmpty() && "+-.0123456789".indexOf(exponent.charAt(0)) >= 0;
-    chosen.put("exponent.rule", number ? "fixed" : exponent);
-    if (number) {
-      chosen.put("exponent.value", exponent);
-    }
-  }
-
-  @Option(
-      names = "--edge-ensembles",
-      order = 16,
-      paramLabel = "N",
-      description = "Number of ensembles averaged beside each edge.")
-  private void setEdgeEnsembles(String count) {
-    chosen.put("edge_ensembles", count);
-  }
-
-  @Option(
-      names = "--set",
-      order = 17,
-      paramLabel = "KEY=VALUE",
-      description =
-          "Any choice by its key in settings.json, for example screening.spikes_mps=off; may be"
-              + " repeated.")
-  private void setAny(Map<String, String> choices) {
-    chosen.putAll(choices);
+  private static Given<String> choice(Usage usage, String name, String label, String description) {
+    return usage.option(name, label, String.class, null, description);
   }
 
   /** The options' choices as JSON with the keys of {@code settings.json}; empty for none. */
   String asJson() {
+    Map<String, String> chosen = new LinkedHashMap<>(any.value());
+    put(chosen, "method", method);
+    put(chosen, isNumber(section.value()) ? "section.line.azimuth_deg" : "section.line", section);
+    put(chosen, "depth.source", depth);
+    put(chosen, "top", top);
+    put(chosen, "bottom", bottom);
+    if (isNumber(exponent.value())) {
+      chosen.put("exponent.rule", "fixed");
+      put(chosen, "exponent.value", exponent);
+    } else {
+      put(chosen, "exponent.rule", exponent);
+    }
+    put(chosen, "edge_ensembles", edgeEnsembles);
     return chosen.isEmpty() ? "" : NestedJson.of(chosen);
+  }
+
+  private static void put(Map<String, String> chosen, String key, Given<String> given) {
+    if (given.value() != null) {
+      chosen.put(key, given.value());
+    }
+  }
+
+  private static boolean isNumber(String given) {
+    return given != null && !given.isEmpty() && "+-.0123456789".indexOf(given.charAt(0)) >= 0;
   }
 
   /**
@@ -102,8 +88,7 @@ final class ChoiceOptions {
    * @throws UnusableInput when a key or a value is not valid
    */
   Settings applyTo(Settings settings) throws UnusableInput {
-    return chosen.isEmpty()
-        ? settings
-        : SettingsFile.parse(NestedJson.of(chosen), "command line", settings);
+    String json = asJson();
+    return json.isEmpty() ? settings : SettingsFile.parse(json, "command line", settings);
   }
 }

@@ -8,7 +8,6 @@ import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.EnumSet;
 import java.util.List;
-import java.util.concurrent.Callable;
 import org.crossreach.evidence.Comparer;
 import org.crossreach.evidence.Comparison;
 import org.crossreach.evidence.Verdict;
@@ -25,93 +24,83 @@ import org.crossreach.report.comparison.SiteText;
 import org.crossreach.settings.Settings;
 import org.crossreach.survey.Measurement;
 import org.crossreach.survey.UnusableInput;
-import picocli.CommandLine.Command;
-import picocli.CommandLine.Mixin;
-import picocli.CommandLine.Model.CommandSpec;
-import picocli.CommandLine.Option;
-import picocli.CommandLine.ParameterException;
-import picocli.CommandLine.Parameters;
-import picocli.CommandLine.Spec;
 
 /** Compares every choice of laws and exponent for the unmeasured water, with the evidence. */
-@Command(
-    name = "compare",
-    description =
-        "Compare every choice of laws and exponent for the unmeasured water, with what the measured"
-            + " cells say about each.")
-final class Compare implements Callable<Integer> {
+final class Compare implements Job {
 
   private static final Path DEFAULT_OUT = Path.of("reports");
 
-  @Parameters(
-      arity = "1..*",
-      paramLabel = "FOLDER",
-      description = "The folder of a measurement; several are set side by side.")
-  private List<Path> folders;
+  private final Usage usage =
+      new Usage(
+          "compare",
+          "Compare every choice of laws and exponent for the unmeasured water, with what the"
+              + " measured cells say about each.",
+          this);
 
-  @Mixin private ChoiceOptions choices;
+  private final Given<List<Path>> folders =
+      usage.operands(
+          1, "FOLDER", Path.class, "The folder of a measurement; several are set side by side.");
 
-  @Mixin private PassOptions passes;
+  private final ChoiceOptions choices = new ChoiceOptions(usage);
+  private final PassOptions passes = new PassOptions(usage);
 
-  @Option(
-      names = "--write",
-      order = 80,
-      split = ",",
-      paramLabel = "KIND",
-      description =
+  private final Given<List<FileKind>> kinds =
+      usage.list(
+          "--write",
+          "KIND",
+          FileKind.class,
+          List.of(),
           "Write files of these kinds, with commas between them: json, csv, png, svg;"
               + " comparison.json always comes with them. Without --out they go to reports/."
-              + " (with --out alone: json,csv)")
-  private List<FileKind> kinds = List.of();
+              + " (with --out alone: json,csv)");
 
-  @Option(
-      names = "--write-settings",
-      order = 81,
-      description =
+  private final Given<Boolean> writeSettings =
+      usage.flag(
+          "--write-settings",
           "Where the evidence favours another choice, write it into the measurement's"
-              + " settings.json. Without this nothing changes.")
-  private boolean writeSettings;
+              + " settings.json. Without this nothing changes.");
 
-  @Option(names = "--csv", order = 89, description = "Print every combination as a CSV table.")
-  private boolean csv;
+  private final Given<Boolean> csv = usage.flag("--csv", "Print every combination as a CSV table.");
 
-  @Mixin private OutputOptions output;
+  private final OutputOptions output = new OutputOptions(usage);
 
-  @Spec private CommandSpec spec;
+  @Override
+  public Usage usage() {
+    return usage;
+  }
 
   @Override
   public Integer call() throws UnusableInput, IOException {
-    for (FileKind kind : kinds) {
+    for (FileKind kind : kinds.value()) {
       if (!ComparisonFiles.KINDS.contains(kind)) {
-        throw new ParameterException(
-            spec.commandLine(), "A comparison cannot be written as " + kind.key());
+        throw usage.wrong("A comparison cannot be written as " + kind.key());
       }
     }
     List<Comparison> comparisons = new ArrayList<>();
-    for (Path folder : folders) {
-      Measurement measurement = passes.applyTo(MeasurementFolder.read(folder), spec.commandLine());
+    for (Path folder : folders.value()) {
+      Measurement measurement = passes.applyTo(MeasurementFolder.read(folder));
       Settings settings = choices.applyTo(SettingsFile.read(folder));
       comparisons.add(Comparer.onAllProcessors().compare(measurement, settings));
     }
-    if (output.out != null || !kinds.isEmpty()) {
+    if (output.out() != null || !kinds.value().isEmpty()) {
       for (Comparison each : comparisons) {
         write(each);
       }
     }
     print(comparisons);
-    if (writeSettings) {
-      for (int m = 0; m < folders.size(); m++) {
-        writeSettings(comparisons.get(m), folders.get(m));
+    if (writeSettings.value()) {
+      for (int m = 0; m < folders.value().size(); m++) {
+        writeSettings(comparisons.get(m), folders.value().get(m));
       }
     }
     return ExitCode.DONE;
   }
 
   private void print(List<Comparison> comparisons) throws IOException {
-    PrintWriter out = spec.commandLine().getOut();
-    if (output.json || csv) {
+    PrintWriter out = usage.out();
+    if (output.json() || csv.value()) {
       ByteArrayOutputStream bytes = new ByteArrayOutputStream();
-      if (output.json) {
+      if (output.json()) {
         ComparisonJson.write(comparisons, bytes);
       } else {
         ComparisonCsv.write(comparisons, bytes);
@@ -120,7 +109,7 @@ final class Compare implements Callable<Integer> {
     } else {
       List<String> texts = new ArrayList<>();
       for (Comparison each : comparisons) {
-        texts.add(new ComparisonText(each, output.units).text());
+        texts.add(new ComparisonText(each, output.units()).text());
       }
       if (comparisons.size() > 1) {
         texts.add(new SiteText(comparisons).text());
@@ -131,16 +120,16 @@ final class Compare implements Callable<Integer> {
   }
 
   private void write(Comparison comparison) throws CannotWrite {
-    Path root = output.out == null ? DEFAULT_OUT : output.out;
+    Path root = output.out() == null ? DEFAULT_OUT : output.out();
     Path target = root.resolve(comparison.chosen().reduction().measurement().id());
     EnumSet<FileKind> wanted = EnumSet.of(FileKind.JSON);
-    wanted.addAll(kinds.isEmpty() ? List.of(FileKind.CSV) : kinds);
+    wanted.addAll(kinds.value().isEmpty() ? List.of(FileKind.CSV) : kinds.value());
     CannotWrite.unless(
         target,
         () -> {
           OutputFolder files = OutputFolder.claim(target);
           for (FileKind kind : wanted) {
-            ComparisonFiles.write(comparison, kind, output.units, files);
+            ComparisonFiles.write(comparison, kind, output.units(), files);
           }
         });
     remark("written to " + target);
@@ -158,8 +147,8 @@ final class Compare implements Callable<Integer> {
   }
 
   private void remark(String text) {
-    if (!output.quiet) {
-      spec.commandLine().getErr().println(text);
+    if (!output.quiet()) {
+      usage.err().println(text);
     }
   }
 }

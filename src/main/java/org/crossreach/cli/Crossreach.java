@@ -5,57 +5,43 @@ import java.io.FileOutputStream;
 import java.io.OutputStreamWriter;
 import java.io.PrintWriter;
 import java.nio.charset.StandardCharsets;
-import java.util.List;
-import java.util.Locale;
+import java.nio.file.Path;
+import java.util.LinkedHashMap;
+import java.util.Map;
+import java.util.function.Supplier;
 import org.crossreach.report.FileKind;
 import org.crossreach.report.ProgramVersion;
 import org.crossreach.report.Units;
 import picocli.CommandLine;
-import picocli.CommandLine.Command;
-import picocli.CommandLine.IVersionProvider;
 import picocli.CommandLine.Model.CommandSpec;
-import picocli.CommandLine.Option;
-import picocli.CommandLine.ParameterException;
-import picocli.CommandLine.ScopeType;
-import picocli.CommandLine.Spec;
 
 /** The program: finds the command that is asked for and runs it. */
-@Command(
-    name = ProgramVersion.NAME,
-    description = "From moving-boat ADCP passes to one defensible river discharge.",
-    versionProvider = Crossreach.Version.class,
-    synopsisSubcommandLabel = "COMMAND",
-    commandListHeading = "%nCommands:%n",
-    footer = "%nHelp on a command: crossreach COMMAND --help")
-public final class Crossreach implements Runnable {
+public final class Crossreach {
 
-  /** Every command: a class named as the command is typed, with a capital first letter. */
-  static final List<Class<?>> COMMANDS =
-      List.of(Reduce.class, Compare.class, Archive.class, Check.class, Simulate.class);
+  /** Every command, by the word that is typed. */
+  static final Map<String, Supplier<Job>> COMMANDS = new LinkedHashMap<>();
 
-  @Option(
-      names = "--version",
-      versionHelp = true,
-      order = 97,
-      description = "Print the version of the program and end.")
-  boolean version;
+  static {
+    COMMANDS.put("reduce", Reduce::new);
+    COMMANDS.put("compare", Compare::new);
+    COMMANDS.put("archive", Archive::new);
+    COMMANDS.put("check", Check::new);
+    COMMANDS.put("simulate", Simulate::new);
+  }
 
-  @Option(
-      names = {"-h", "--help"},
-      usageHelp = true,
-      scope = ScopeType.INHERIT,
-      order = 98,
-      description = "Print this help and end.")
-  boolean help;
+  private final Usage usage =
+      new Usage(
+          ProgramVersion.NAME,
+          "From moving-boat ADCP passes to one defensible river discharge.",
+          this::commandMissing);
 
-  @Option(
-      names = "--debug",
-      scope = ScopeType.INHERIT,
-      order = 99,
-      description = "When something fails, show the stack trace too.")
-  boolean debug;
+  private final Given<Boolean> debug;
 
-  @Spec CommandSpec spec;
+  private Crossreach() {
+    usage.version("--version", "Print the version of the program and end.");
+    usage.commonFlag("Print this help and end.", "-h", "--help");
+    debug = usage.commonFlag("When something fails, show the stack trace too.", "--debug");
+  }
 
   /**
    * Runs the program and ends the process with one of the exit codes that {@code --help} lists.
@@ -92,62 +78,47 @@ public final class Crossreach implements Runnable {
    * @return the exit code
    */
   static int run(String[] words, PrintWriter out, PrintWriter err) {
-    Failures failures = new Failures(err);
+    Crossreach program = new Crossreach();
+    Failures failures = new Failures(err, program.debug::value);
     try {
-      return commandLine(words)
+      return program
+          .commandLine(words)
           .setOut(out)
           .setErr(err)
           .setParameterExceptionHandler(failures)
           .setExecutionExceptionHandler(failures)
           .execute(words);
     } catch (Error failure) {
-      return failures.tell(failure, List.of(words).contains("--debug"));
+      return failures.tell(failure);
     }
   }
 
-  private static CommandLine commandLine(String[] words) {
-    CommandLine program = new CommandLine(new Crossreach());
-    for (Class<?> command : COMMANDS) {
-      String name = command.getSimpleName().toLowerCase(Locale.ROOT);
-      if (words.length > 0 && name.equals(words[0])) {
-        return withShared(program.addSubcommand(name, command));
-      }
+  /** The reader of the command line; it knows the asked command alone, or else all of them. */
+  private CommandLine commandLine(String[] words) {
+    CommandSpec spec = usage.spec().versionProvider(Crossreach::version);
+    spec.usageMessage()
+        .synopsisSubcommandLabel("COMMAND")
+        .commandListHeading("%nCommands:%n")
+        .footer("%nHelp on a command: crossreach COMMAND --help");
+    CommandLine program = new CommandLine(spec);
+    Supplier<Job> asked = words.length == 0 ? null : COMMANDS.get(words[0]);
+    if (asked != null) {
+      program.addSubcommand(words[0], asked.get().usage().spec());
+    } else {
+      COMMANDS.forEach((word, job) -> program.addSubcommand(word, job.get().usage().spec()));
     }
-    for (Class<?> command : COMMANDS) {
-      program.addSubcommand(command.getSimpleName().toLowerCase(Locale.ROOT), command);
-    }
-    return withShared(program);
-  }
-
-  /** Adds what holds for the program and all its commands alike. */
-  private static CommandLine withShared(CommandLine program) {
-    layOutHelp(program);
-    program.getSubcommands().values().forEach(Crossreach::layOutHelp);
     return program
         .setExpandAtFiles(false)
+        .registerConverter(Path.class, Path::of)
         .registerConverter(Units.class, new ChoiceConverter<>(Units.class))
         .registerConverter(FileKind.class, new ChoiceConverter<>(FileKind.class));
   }
 
-  private static void layOutHelp(CommandLine command) {
-    command
-        .getCommandSpec()
-        .usageMessage()
-        .sortOptions(false)
-        .exitCodeListHeading("%nExit codes:%n")
-        .exitCodeList(ExitCode.explained());
+  private Integer commandMissing() {
+    throw usage.wrong("A command is missing");
   }
 
-  @Override
-  public void run() {
-    throw new ParameterException(spec.commandLine(), "A command is missing");
-  }
-
-  /** Reads the version only when it is asked for. */
-  static final class Version implements IVersionProvider {
-    @Override
-    public String[] getVersion() {
-      return new String[] {ProgramVersion.NAME + " " + ProgramVersion.read()};
-    }
+  private static String[] version() {
+    return new String[] {ProgramVersion.NAME + " " + ProgramVersion.read()};
   }
 }

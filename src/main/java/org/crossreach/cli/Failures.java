@@ -3,6 +3,7 @@ package org.crossreach.cli;
 import java.io.IOException;
 import java.io.PrintWriter;
 import java.io.UncheckedIOException;
+import java.util.function.BooleanSupplier;
 import org.crossreach.report.CheckReport;
 import org.crossreach.report.FileTrouble;
 import org.crossreach.report.ProgramVersion;
@@ -24,9 +25,11 @@ final class Failures implements IParameterExceptionHandler, IExecutionExceptionH
   private static final String PROGRAM = ProgramVersion.NAME + ": ";
 
   private final PrintWriter err;
+  private final BooleanSupplier debug;
 
-  Failures(PrintWriter err) {
+  Failures(PrintWriter err, BooleanSupplier debug) {
     this.err = err;
+    this.debug = debug;
   }
 
   @Override
@@ -44,19 +47,17 @@ final class Failures implements IParameterExceptionHandler, IExecutionExceptionH
     if (failure instanceof ParameterException wrongUsage) {
       return handleParseException(wrongUsage, new String[0]);
     }
-    Crossreach program = (Crossreach) command.getCommandSpec().root().userObject();
-    return tell(failure, program.debug);
+    return tell(failure);
   }
 
   /**
    * Tells a failure.
    *
    * @param failure what ended the command
-   * @param debug whether to show the stack trace too
    * @return the exit code
    */
-  int tell(Throwable failure, boolean debug) {
-    if (debug) {
+  int tell(Throwable failure) {
+    if (debug.getAsBoolean()) {
       failure.printStackTrace(err);
     }
     for (Throwable cause = failure; cause != null; cause = cause.getCause()) {

@@ -2,35 +2,45 @@ package org.crossreach.cli;
 
 import java.nio.file.Path;
 import org.crossreach.report.Units;
-import picocli.CommandLine.Option;
 
-/** The options that every command shares; a command takes them in with {@code @Mixin}. */
+/** The options of commands that print a result or write it to files. */
 final class OutputOptions {
 
-  @Option(
-      names = "--json",
-      order = 90,
-      description = "Print the result as JSON, for machines; always in SI units.")
-  boolean json;
+  private final Given<Boolean> json;
+  private final Given<Units> units;
+  private final Given<Path> out;
+  private final Given<Boolean> quiet;
 
-  @Option(
-      names = "--units",
-      order = 91,
-      paramLabel = "si|us",
-      defaultValue = "si",
-      description = "Units of tables and reports: SI or US customary (default: si).")
-  Units units;
+  OutputOptions(Usage usage) {
+    json = usage.flag("--json", "Print the result as JSON, for machines; always in SI units.");
+    units =
+        usage.option(
+            "--units",
+            "si|us",
+            Units.class,
+            Units.SI,
+            "Units of tables and reports: SI or US customary (default: si).");
+    out =
+        usage.option(
+            "--out", "DIR", Path.class, null, "Write the files of the result into this folder.");
+    quiet =
+        usage.flag("--quiet", "No progress and no remarks on standard error; errors still appear.");
+  }
 
-  @Option(
-      names = "--out",
-      order = 92,
-      paramLabel = "DIR",
-      description = "Write the files of the result into this folder.")
-  Path out;
+  boolean json() {
+    return json.value();
+  }
 
-  @Option(
-      names = "--quiet",
-      order = 93,
-      description = "No progress and no remarks on standard error; errors still appear.")
-  boolean quiet;
+  Units units() {
+    return units.value();
+  }
+
+  /** The folder for files, or null. */
+  Path out() {
+    return out.value();
+  }
+
+  boolean quiet() {
+    return quiet.value();
+  }
 }

@@ -7,7 +7,6 @@ import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
 import java.util.EnumSet;
 import java.util.List;
-import java.util.concurrent.Callable;
 import org.crossreach.agreement.Result;
 import org.crossreach.discharge.Reducer;
 import org.crossreach.ingest.MeasurementFolder;
@@ -19,48 +18,43 @@ import org.crossreach.report.result.ResultJson;
 import org.crossreach.settings.Settings;
 import org.crossreach.survey.Measurement;
 import org.crossreach.survey.UnusableInput;
-import picocli.CommandLine.Command;
-import picocli.CommandLine.Mixin;
-import picocli.CommandLine.Model.CommandSpec;
-import picocli.CommandLine.Option;
-import picocli.CommandLine.Parameters;
-import picocli.CommandLine.Spec;
 
 /** Reduces a set of passes to one discharge: the main job. */
-@Command(
-    name = "reduce",
-    description = "Reduce a folder of passes to one discharge, with its spread.")
-final class Reduce implements Callable<Integer> {
+final class Reduce implements Job {
 
   private static final Path DEFAULT_OUT = Path.of("reports");
 
-  @Parameters(paramLabel = "FOLDER", description = "The folder of the measurement.")
-  private Path folder;
+  private final Usage usage =
+      new Usage("reduce", "Reduce a folder of passes to one discharge, with its spread.", this);
 
-  @Mixin private ChoiceOptions choices;
+  private final Given<Path> folder =
+      usage.operand("FOLDER", Path.class, "The folder of the measurement.");
 
-  @Mixin private PassOptions passes;
+  private final ChoiceOptions choices = new ChoiceOptions(usage);
+  private final PassOptions passes = new PassOptions(usage);
 
-  @Option(
-      names = "--write",
-      order = 80,
-      split = ",",
-      paramLabel = "KIND",
-      description =
+  private final Given<List<FileKind>> kinds =
+      usage.list(
+          "--write",
+          "KIND",
+          FileKind.class,
+          List.of(),
           "Write files of these kinds, with commas between them; result.json always comes with"
-              + " them. Without --out they go to reports/. (with --out alone: json,csv)")
-  private List<FileKind> kinds = List.of();
+              + " them. Without --out they go to reports/. (with --out alone: json,csv)");
 
-  @Mixin private OutputOptions output;
+  private final OutputOptions output = new OutputOptions(usage);
 
-  @Spec private CommandSpec spec;
+  @Override
+  public Usage usage() {
+    return usage;
+  }
 
   @Override
   public Integer call() throws UnusableInput, IOException {
-    Measurement measurement = passes.applyTo(MeasurementFolder.read(folder), spec.commandLine());
-    Settings settings = choices.applyTo(SettingsFile.read(folder));
+    Measurement measurement = passes.applyTo(MeasurementFolder.read(folder.value()));
+    Settings settings = choices.applyTo(SettingsFile.read(folder.value()));
     Result result = Result.of(Reducer.onAllProcessors().reduce(measurement, settings));
-    if (output.out != null || !kinds.isEmpty()) {
+    if (output.out() != null || !kinds.value().isEmpty()) {
       write(result);
     }
     print(result);
@@ -68,32 +62,32 @@ final class Reduce implements Callable<Integer> {
   }
 
   private void print(Result result) throws IOException {
-    PrintWriter out = spec.commandLine().getOut();
-    if (output.json) {
+    PrintWriter out = usage.out();
+    if (output.json()) {
       ByteArrayOutputStream json = new ByteArrayOutputStream();
       ResultJson.write(result, json);
       out.print(json.toString(StandardCharsets.UTF_8));
     } else {
-      out.print(new ConsoleReport(result, output.units).text());
+      out.print(new ConsoleReport(result, output.units()).text());
     }
     out.flush();
   }
 
   private void write(Result result) throws CannotWrite {
-    Path root = output.out == null ? DEFAULT_OUT : output.out;
+    Path root = output.out() == null ? DEFAULT_OUT : output.out();
     Path target = root.resolve(result.reduction().measurement().id());
     EnumSet<FileKind> wanted = EnumSet.of(FileKind.JSON);
-    wanted.addAll(kinds.isEmpty() ? List.of(FileKind.CSV) : kinds);
+    wanted.addAll(kinds.value().isEmpty() ? List.of(FileKind.CSV) : kinds.value());
     CannotWrite.unless(
         target,
         () -> {
           OutputFolder files = OutputFolder.claim(target);
           for (FileKind kind : wanted) {
-            kind.write(result, output.units, files);
+            kind.write(result, output.units(), files);
           }
         });
-    if (!output.quiet) {
-      spec.commandLine().getErr().println("written to " + target);
+    if (!output.quiet()) {
+      usage.err().println("written to " + target);
     }
   }
 }

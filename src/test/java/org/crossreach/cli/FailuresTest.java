@@ -93,13 +93,13 @@ class FailuresTest {
   @Test
   void debugShowsTheStackTrace() {
     StringWriter err = new StringWriter();
-    new Failures(new PrintWriter(err)).tell(new IllegalStateException("impossible"), true);
+    new Failures(new PrintWriter(err), () -> true).tell(new IllegalStateException("impossible"));
     assertTrue(err.toString().contains("at org.crossreach.cli.FailuresTest"), err.toString());
   }
 
   private static void assertTold(int code, String told, Throwable failure) {
     StringWriter err = new StringWriter();
-    assertEquals(code, new Failures(new PrintWriter(err)).tell(failure, false));
+    assertEquals(code, new Failures(new PrintWriter(err), () -> false).tell(failure));
     assertEquals(told, err.toString());
   }
 

@@ -5,7 +5,6 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.nio.file.Files;
 import java.nio.file.Path;
-import java.util.Locale;
 import org.junit.jupiter.api.Test;
 
 /** What the README prints is what the program prints. */
@@ -27,8 +26,7 @@ class ReadmeTest {
   @Test
   void listsEveryCommand() throws Exception {
     String readme = Files.readString(Path.of("README.md"));
-    for (Class<?> command : Crossreach.COMMANDS) {
-      String name = command.getSimpleName().toLowerCase(Locale.ROOT);
+    for (String name : Crossreach.COMMANDS.keySet()) {
       assertTrue(readme.contains("| `" + name + " "), name);
     }
   }
