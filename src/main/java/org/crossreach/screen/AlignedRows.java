@@ -17,15 +17,13 @@ final class AlignedRows {
   /** More than half of the rows before and after. */
   private static final int MAJORITY = REACH + 1;
 
-  /** The rows before and after the middle one. */
-  private static final int[] NEAREST_FIRST = {2, 4, 1, 5, 0, 6};
-
   private final CellFacts facts;
   private final RowWindow window;
   private final double[][] east = new double[ROWS][];
   private final double[][] north = new double[ROWS][];
   private final double[][] shiftedEast;
   private final double[][] shiftedNorth;
+  private final double[] nowhere;
   private final double[] middleEast = new double[ROWS];
   private final double[] middleNorth = new double[ROWS];
   private final double[] offsetEast = new double[ROWS];
@@ -38,6 +36,8 @@ final class AlignedRows {
     this.facts = facts;
     this.window = window;
     agreeing = new int[facts.cells()];
+    nowhere = new double[facts.cells()];
+    Arrays.fill(nowhere, Double.NaN);
     shiftedEast = new double[ROWS][facts.cells()];
     shiftedNorth = new double[ROWS][facts.cells()];
   }
@@ -49,8 +49,8 @@ final class AlignedRows {
       int other = ensemble + d;
       int row = d + REACH;
       boolean there = other >= 0 && other < facts.size();
-      east[row] = there ? window.east(other) : null;
-      north[row] = there ? window.north(other) : null;
+      east[row] = there ? window.east(other) : nowhere;
+      north[row] = there ? window.north(other) : nowhere;
       if (there) {
         middleEast[row] = window.middleEast(other);
         middleNorth[row] = window.middleNorth(other);
@@ -94,9 +94,8 @@ final class AlignedRows {
    */
   int disagreeing(double near, byte[] reasons, int[] found) {
     Arrays.fill(agreeing, 0);
-    for (int n = 0; n < MAJORITY; n++) {
-      agree(NEAREST_FIRST[n], near);
-    }
+    agree(1, near);
+    agree(2, near);
     int size = 0;
     for (int k = 0; k < reasons.length; k++) {
       if (reasons[k] == 0 && agreeing[k] < MAJORITY) {
@@ -106,9 +105,7 @@ final class AlignedRows {
     if (size == 0) {
       return 0;
     }
-    for (int n = MAJORITY; n < NEAREST_FIRST.length; n++) {
-      agree(NEAREST_FIRST[n], near);
-    }
+    agree(REACH, near);
     int left = 0;
     for (int s = 0; s < size; s++) {
       if (agreeing[found[s]] < MAJORITY) {
@@ -118,21 +115,34 @@ final class AlignedRows {
     return left;
   }
 
-  /** Counts the cells of the middle ensemble to which those of another row are near. */
-  private void agree(int row, double near) {
-    double[] otherEast = east[row];
-    double[] otherNorth = north[row];
-    if (otherEast == null) {
-      return;
-    }
+  /**
+   * Counts the cells of the middle ensemble to which those of two other rows are near.
+   *
+   * @param distance how many rows before and after the middle one the two lie
+   */
+  private void agree(int distance, double near) {
+    int before = REACH - distance;
+    int after = REACH + distance;
+    double[] eastBefore = east[before];
+    double[] northBefore = north[before];
+    double[] eastAfter = east[after];
+    double[] northAfter = north[after];
     double[] ownEast = east[REACH];
     double[] ownNorth = north[REACH];
-    double shiftEast = offsetEast[row] - offsetEast[REACH];
-    double shiftNorth = offsetNorth[row] - offsetNorth[REACH];
+    double shiftEastBefore = offsetEast[before] - offsetEast[REACH];
+    double shiftNorthBefore = offsetNorth[before] - offsetNorth[REACH];
+    double shiftEastAfter = offsetEast[after] - offsetEast[REACH];
+    double shiftNorthAfter = offsetNorth[after] - offsetNorth[REACH];
     int[] count = agreeing;
     for (int k = 0; k < count.length; k++) {
-      if (Math.abs(otherEast[k] - ownEast[k] - shiftEast) <= near
-          && Math.abs(otherNorth[k] - ownNorth[k] - shiftNorth) <= near) {
+      double e = ownEast[k];
+      double n = ownNorth[k];
+      if (Math.abs(eastBefore[k] - e - shiftEastBefore) <= near
+          && Math.abs(northBefore[k] - n - shiftNorthBefore) <= near) {
+        count[k]++;
+      }
+      if (Math.abs(eastAfter[k] - e - shiftEastAfter) <= near
+          && Math.abs(northAfter[k] - n - shiftNorthAfter) <= near) {
         count[k]++;
       }
     }
@@ -152,7 +162,7 @@ final class AlignedRows {
    */
   boolean has(int d, int cell) {
     double[] row = east[d + REACH];
-    return row != null && cell >= 0 && cell < row.length && !Double.isNaN(row[cell]);
+    return cell >= 0 && cell < row.length && !Double.isNaN(row[cell]);
   }
 
   /** Eastward velocity (m/s) of a cell that {@linkplain #has is there}. */
