@@ -1,7 +1,8 @@
 """The same reduction as `crossreach reduce FOLDER --json`, straightforwardly with numpy and pandas.
 
 Written for comparing speed only (Debian: python3-pandas): earth frame, bottom track, each pass's own
-line, slant-mean depths, power laws with the exponent 1/6, no screens but the side-lobe limit.
+line, slant-mean depths, power laws with the exponent 1/6, no screens but the side-lobe limit. So the
+program does the same work with its screens off, and more with its default screens: give both ratios.
 
     python3 src/bench/python/reduce_baseline.py FOLDER
 """

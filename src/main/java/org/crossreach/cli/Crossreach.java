@@ -13,6 +13,8 @@ import org.crossreach.report.FileKind;
 import org.crossreach.report.ProgramVersion;
 import org.crossreach.report.Units;
 import picocli.CommandLine;
+import picocli.CommandLine.ITypeConverter;
+import picocli.CommandLine.IVersionProvider;
 import picocli.CommandLine.Model.CommandSpec;
 
 /** The program: finds the command that is asked for and runs it. */
@@ -95,12 +97,12 @@ public final class Crossreach {
 
   /** The reader of the command line; it knows the asked command alone, or else all of them. */
   private CommandLine commandLine(String[] words) {
-    CommandSpec spec = usage.spec().versionProvider(Crossreach::version);
+    CommandSpec spec = usage.spec().versionProvider(new Version());
     spec.usageMessage()
         .synopsisSubcommandLabel("COMMAND")
         .commandListHeading("%nCommands:%n")
         .footer("%nHelp on a command: crossreach COMMAND --help");
-    CommandLine program = new CommandLine(spec);
+    CommandLine program = new CommandLine(spec, new Collected());
     Supplier<Job> asked = words.length == 0 ? null : COMMANDS.get(words[0]);
     if (asked != null) {
       program.addSubcommand(words[0], asked.get().usage().spec());
@@ -109,7 +111,7 @@ public final class Crossreach {
     }
     return program
         .setExpandAtFiles(false)
-        .registerConverter(Path.class, Path::of)
+        .registerConverter(Path.class, new PathConverter())
         .registerConverter(Units.class, new ChoiceConverter<>(Units.class))
         .registerConverter(FileKind.class, new ChoiceConverter<>(FileKind.class));
   }
@@ -118,7 +120,21 @@ public final class Crossreach {
     throw usage.wrong("A command is missing");
   }
 
-  private static String[] version() {
-    return new String[] {ProgramVersion.NAME + " " + ProgramVersion.read()};
+  // Both are classes and no lambdas, since picocli's class files are so old that the archive of
+  // classes can hold no lambda for them, nor what else implements the same interface.
+
+  /** Reads the version only when it is asked for. */
+  private static final class Version implements IVersionProvider {
+    @Override
+    public String[] getVersion() {
+      return new String[] {ProgramVersion.NAME + " " + ProgramVersion.read()};
+    }
+  }
+
+  private static final class PathConverter implements ITypeConverter<Path> {
+    @Override
+    public Path convert(String path) {
+      return Path.of(path);
+    }
   }
 }

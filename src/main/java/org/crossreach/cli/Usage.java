@@ -29,7 +29,7 @@ final class Usage {
    * @param work what the command does; it gives the exit code
    */
   Usage(String name, String description, Callable<Integer> work) {
-    spec = CommandSpec.wrapWithoutInspection(work).name(name);
+    spec = CommandSpec.wrapWithoutInspection(work, new Collected()).name(name);
     spec.usageMessage()
         .description(description)
         .sortOptions(false)

@@ -10,6 +10,7 @@ import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
+import java.util.Collections;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
@@ -206,7 +207,7 @@ class DistributionIT {
   }
 
   @Test
-  void takesTheThoroughCompilerForBatchesAndForDigestingMuch() throws Exception {
+  void takesTheThoroughCompilerForLargeBatchesOfPagesAndForDigestingMuch() throws Exception {
     Path large = Files.createDirectory(folder.resolve("large one"));
     Files.createFile(large.resolve("measurement.json"));
     String report = "-XX:+PrintFlagsFinal -XX:+UseSerialGC -XX:+UnlockDiagnosticVMOptions";
@@ -216,8 +217,14 @@ class DistributionIT {
     Map<String, String> options = Map.of("CROSSREACH_JAVA_OPTS", report + " -XX:+DisplayVMOutput");
     String small = start(folder, options, program, "check", large.toString()).out();
     assertTrue(small.contains(quick) && !small.contains(directed), small);
-    String batch = start(folder, options, program, "archive", large.toString()).out();
-    assertFalse(batch.contains(directed) || batch.contains(quick), batch);
+    String few = start(folder, options, program, "archive", large.toString()).out();
+    assertTrue(few.contains(quick) && !few.contains(directed), few);
+    Path list = Files.write(folder.resolve("list"), Collections.nCopies(300, large.toString()));
+    String from = "--from=" + list;
+    String many = start(folder, options, program, "archive", from).out();
+    assertFalse(many.contains(directed) || many.contains(quick), many);
+    String tables = start(folder, options, program, "archive", from, "--write", "csv").out();
+    assertTrue(tables.contains(quick) && !tables.contains(directed), tables);
     Files.write(large.resolve("pass-01.csv"), new byte[21_000_000]);
     String much = start(folder, options, program, "check", large.toString()).out();
     assertTrue(much.contains(directed) && !much.contains(quick), much);
