@@ -1,6 +1,8 @@
 package org.crossreach.cli;
 
 import java.io.PrintWriter;
+import java.text.DecimalFormat;
+import java.text.DecimalFormatSymbols;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
@@ -50,7 +52,7 @@ final class ArchiveProgress implements ArchiveRun.Listener, AutoCloseable {
             .setEtaFunction(state -> left.at(System.nanoTime()))
             .setConsumer(line)
             .continuousUpdate()
-            .showSpeed()
+            .showSpeed(new DecimalFormat("0.0", DecimalFormatSymbols.getInstance(Locale.ROOT)))
             .build();
   }
 

@@ -101,13 +101,18 @@ public final class JsonTree {
   /** The parser's complaint as one short phrase. */
   private static String complaint(JsonProcessingException failure) {
     String message = failure.getOriginalMessage();
-    int end = message.indexOf('\n');
-    String first = end < 0 ? message : message.substring(0, end);
+    // what is behind these tells of the parser's own affairs
+    String first = before("\n", before(" (start marker at", message));
     String place =
         failure.getLocation() == null
             ? ""
             : " (column " + failure.getLocation().getColumnNr() + ")";
     return "an error of syntax" + place + ": " + Quoted.cut(first, 160);
+  }
+
+  private static String before(String mark, String text) {
+    int end = text.indexOf(mark);
+    return end < 0 ? text : text.substring(0, end);
   }
 
   private int line() {

@@ -1,6 +1,7 @@
 package org.crossreach.ingest;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.nio.charset.StandardCharsets;
@@ -75,6 +76,7 @@ class JsonTreeTest {
     assertEquals(Optional.empty(), JsonTree.parse(text.replace('~', '\n'), problems));
     assertEquals("some.json", onlyProblem().file());
     assertEquals(line, onlyProblem().line());
+    assertFalse(onlyProblem().found().contains("Source"), "words of the parser about itself");
   }
 
   @ParameterizedTest
