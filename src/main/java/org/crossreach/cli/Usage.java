@@ -111,7 +111,7 @@ final class Usage {
   /** The one operand. */
   <T> Given<T> operand(String label, Class<T> type, String description) {
     return add(
-        PositionalParamSpec.builder().index("0").paramLabel(label).type(type).arity("1"),
+        PositionalParamSpec.builder().index("0").paramLabel(label).type(type).required(true),
         description,
         null);
   }
@@ -123,7 +123,8 @@ final class Usage {
             .paramLabel(label)
             .type(List.class)
             .auxiliaryTypes(type)
-            .arity(fewest + "..*"),
+            .arity(fewest + "..*")
+            .required(fewest > 0),
         description,
         List.of());
   }

@@ -6,6 +6,7 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.CsvSource;
 import org.junit.jupiter.params.provider.ValueSource;
 
 /**
@@ -55,6 +56,23 @@ class CrossreachTest {
     assertEquals(ExitCode.WRONG_USAGE, run.code());
     assertEquals("crossreach: A command is missing\nSee 'crossreach --help'.\n", run.err());
     assertEquals("", run.out());
+  }
+
+  @ParameterizedTest
+  @CsvSource({"reduce,FOLDER", "compare,FOLDER", "check,FOLDER", "simulate,RECIPE.json"})
+  void missingOperandIsWrongUsage(String command, String operand) {
+    Run run = Run.of(command);
+    assertEquals(ExitCode.WRONG_USAGE, run.code());
+    assertEquals(
+        "crossreach: Missing required parameter: '%s'\nSee 'crossreach %s --help'.\n"
+            .formatted(operand, command),
+        run.err());
+  }
+
+  @ParameterizedTest
+  @ValueSource(strings = {"reduce a b", "check a b", "simulate a b"})
+  void oneOperandTooManyIsWrongUsage(String words) {
+    assertEquals(ExitCode.WRONG_USAGE, Run.of(words.split(" ")).code());
   }
 
   @Test

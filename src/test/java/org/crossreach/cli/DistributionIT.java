@@ -223,8 +223,10 @@ class DistributionIT {
     String from = "--from=" + list;
     String many = start(folder, options, program, "archive", from).out();
     assertFalse(many.contains(directed) || many.contains(quick), many);
-    String tables = start(folder, options, program, "archive", from, "--write", "csv").out();
-    assertTrue(tables.contains(quick) && !tables.contains(directed), tables);
+    String twice = "--write";
+    Ended tables = start(folder, options, program, "archive", from, twice, "json", twice, "csv");
+    assertTrue(tables.out().contains(quick) && !tables.out().contains(directed), tables.out());
+    assertFalse(tables.err().contains(program + ": "), tables.err());
     Files.write(large.resolve("pass-01.csv"), new byte[21_000_000]);
     String much = start(folder, options, program, "check", large.toString()).out();
     assertTrue(much.contains(directed) && !much.contains(quick), much);
