@@ -6,7 +6,6 @@ import java.io.PrintWriter;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
 import java.util.ArrayList;
-import java.util.EnumSet;
 import java.util.List;
 import org.crossreach.evidence.Comparer;
 import org.crossreach.evidence.Comparison;
@@ -14,7 +13,6 @@ import org.crossreach.evidence.Verdict;
 import org.crossreach.ingest.MeasurementFolder;
 import org.crossreach.ingest.SettingsFile;
 import org.crossreach.report.FileKind;
-import org.crossreach.report.OutputFolder;
 import org.crossreach.report.SettingsFolder;
 import org.crossreach.report.comparison.ComparisonCsv;
 import org.crossreach.report.comparison.ComparisonFiles;
@@ -27,8 +25,6 @@ import org.crossreach.survey.UnusableInput;
 
 /** Compares every choice of laws and exponent for the unmeasured water, with the evidence. */
 final class Compare implements Job {
-
-  private static final Path DEFAULT_OUT = Path.of("reports");
 
   private final Usage usage =
       new Usage(
@@ -82,9 +78,12 @@ final class Compare implements Job {
       Settings settings = choices.applyTo(SettingsFile.read(folder));
       comparisons.add(Comparer.onAllProcessors().compare(measurement, settings));
     }
-    if (output.out() != null || !kinds.value().isEmpty()) {
+    if (output.wantsFiles(kinds.value())) {
       for (Comparison each : comparisons) {
-        write(each);
+        output.write(
+            each.chosen().reduction().measurement().id(),
+            kinds.value(),
+            (kind, files) -> ComparisonFiles.write(each, kind, output.units(), files));
       }
     }
     print(comparisons);
@@ -119,36 +118,14 @@ final class Compare implements Job {
     out.flush();
   }
 
-  private void write(Comparison comparison) throws CannotWrite {
-    Path root = output.out() == null ? DEFAULT_OUT : output.out();
-    Path target = root.resolve(comparison.chosen().reduction().measurement().id());
-    EnumSet<FileKind> wanted = EnumSet.of(FileKind.JSON);
-    wanted.addAll(kinds.value().isEmpty() ? List.of(FileKind.CSV) : kinds.value());
-    CannotWrite.unless(
-        target,
-        () -> {
-          OutputFolder files = OutputFolder.claim(target);
-          for (FileKind kind : wanted) {
-            ComparisonFiles.write(comparison, kind, output.units(), files);
-          }
-        });
-    remark("written to " + target);
-  }
-
   private void writeSettings(Comparison comparison, Path folder) throws CannotWrite {
     Verdict verdict = comparison.verdict();
     if (verdict.kind() != Verdict.Kind.CHANGE) {
-      remark("settings of " + folder + " stay as they are");
+      output.remark("settings of " + folder + " stay as they are");
       return;
     }
     Settings settings = verdict.combination().in(comparison.chosen().reduction().settings());
     CannotWrite.unless(folder, () -> SettingsFolder.write(settings, folder));
-    remark("settings of " + folder + " changed to " + verdict.combination().text());
-  }
-
-  private void remark(String text) {
-    if (!output.quiet()) {
-      usage.err().println(text);
-    }
+    output.remark("settings of " + folder + " changed to " + verdict.combination().text());
   }
 }

@@ -41,8 +41,8 @@ public final class Crossreach {
 
   private Crossreach() {
     usage.version("--version", "Print the version of the program and end.");
-    usage.commonFlag("Print this help and end.", "-h", "--help");
-    debug = usage.commonFlag("When something fails, show the stack trace too.", "--debug");
+    usage.help("-h", "--help", "Print this help and end.");
+    debug = usage.commonFlag("--debug", "When something fails, show the stack trace too.");
   }
 
   /**

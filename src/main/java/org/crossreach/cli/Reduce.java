@@ -5,7 +5,6 @@ import java.io.IOException;
 import java.io.PrintWriter;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
-import java.util.EnumSet;
 import java.util.List;
 import org.crossreach.agreement.Result;
 import org.crossreach.discharge.Reducer;
@@ -13,7 +12,6 @@ import org.crossreach.ingest.MeasurementFolder;
 import org.crossreach.ingest.SettingsFile;
 import org.crossreach.report.ConsoleReport;
 import org.crossreach.report.FileKind;
-import org.crossreach.report.OutputFolder;
 import org.crossreach.report.result.ResultJson;
 import org.crossreach.settings.Settings;
 import org.crossreach.survey.Measurement;
@@ -21,8 +19,6 @@ import org.crossreach.survey.UnusableInput;
 
 /** Reduces a set of passes to one discharge: the main job. */
 final class Reduce implements Job {
-
-  private static final Path DEFAULT_OUT = Path.of("reports");
 
   private final Usage usage =
       new Usage("reduce", "Reduce a folder of passes to one discharge, with its spread.", this);
@@ -54,8 +50,11 @@ final class Reduce implements Job {
     Measurement measurement = passes.applyTo(MeasurementFolder.read(folder.value()));
     Settings settings = choices.applyTo(SettingsFile.read(folder.value()));
     Result result = Result.of(Reducer.onAllProcessors().reduce(measurement, settings));
-    if (output.out() != null || !kinds.value().isEmpty()) {
-      write(result);
+    if (output.wantsFiles(kinds.value())) {
+      output.write(
+          measurement.id(),
+          kinds.value(),
+          (kind, files) -> kind.write(result, output.units(), files));
     }
     print(result);
     return result.hasFault() ? ExitCode.FAULTS_FOUND : ExitCode.DONE;
@@ -71,23 +70,5 @@ final class Reduce implements Job {
       out.print(new ConsoleReport(result, output.units()).text());
     }
     out.flush();
-  }
-
-  private void write(Result result) throws CannotWrite {
-    Path root = output.out() == null ? DEFAULT_OUT : output.out();
-    Path target = root.resolve(result.reduction().measurement().id());
-    EnumSet<FileKind> wanted = EnumSet.of(FileKind.JSON);
-    wanted.addAll(kinds.value().isEmpty() ? List.of(FileKind.CSV) : kinds.value());
-    CannotWrite.unless(
-        target,
-        () -> {
-          OutputFolder files = OutputFolder.claim(target);
-          for (FileKind kind : wanted) {
-            kind.write(result, output.units(), files);
-          }
-        });
-    if (!output.quiet()) {
-      usage.err().println("written to " + target);
-    }
   }
 }

@@ -62,11 +62,18 @@ final class Usage {
     return add(OptionSpec.builder(name).type(boolean.class), description, false);
   }
 
-  /** An option without a value that every command has; listed last in their help. */
-  Given<Boolean> commonFlag(String description, String... names) {
-    OptionSpec.Builder option =
-        OptionSpec.builder(names).type(boolean.class).scopeType(ScopeType.INHERIT);
-    return add(option.order(1).usageHelp(names[0].equals("-h")), description, false);
+  /** An option without a value that every command has too; listed last in their help. */
+  Given<Boolean> commonFlag(String name, String description) {
+    return add(common(name), description, false);
+  }
+
+  /** The option that prints the help, which every command has too; listed last. */
+  void help(String name, String longName, String description) {
+    add(common(name, longName).usageHelp(true), description, false);
+  }
+
+  private static OptionSpec.Builder common(String... names) {
+    return OptionSpec.builder(names).type(boolean.class).scopeType(ScopeType.INHERIT).order(1);
   }
 
   /** The option that prints the version. */

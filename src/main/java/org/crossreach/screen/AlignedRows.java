@@ -94,8 +94,9 @@ final class AlignedRows {
    */
   int disagreeing(double near, byte[] reasons, int[] found) {
     Arrays.fill(agreeing, 0);
-    agree(1, near);
-    agree(2, near);
+    for (int distance = 1; distance < REACH; distance++) {
+      agree(distance, near);
+    }
     int size = 0;
     for (int k = 0; k < reasons.length; k++) {
       if (reasons[k] == 0 && agreeing[k] < MAJORITY) {
